@@ -1,0 +1,2 @@
+/** One columnar type in and out: CSV, charts and reports read and write it. */
+package org.rodside.table;
