@@ -7,6 +7,6 @@ public final class Main {
 
     public static void main(String[] args) {
         System.setProperty("java.awt.headless", "true");
-        System.exit(Rodside.run(args));
+        System.exit(new Rodside().run(args));
     }
 }

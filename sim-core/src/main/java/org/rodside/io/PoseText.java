@@ -1,0 +1,111 @@
+package org.rodside.io;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.regex.Pattern;
+import org.rodside.model.Cylinder;
+import org.rodside.model.InputException;
+import org.rodside.model.Linkage;
+
+/** Reads a pose as typed on the command line, {@code boom=0.4,stick=0.5,bucket=0.3}: fractions of stroke. */
+public final class PoseText {
+
+    /** A plain decimal number; {@code Double.parseDouble} alone would also take {@code NaN}, {@code 0x1p3}, {@code 1d}. */
+    private static final Pattern NUMBER = Pattern.compile("[+-]?(\\d+\\.?\\d*|\\.\\d+)([eE][+-]?\\d+)?");
+
+    private final String option;
+    private final List<String> names;
+    private final double[] fractions;
+    private final boolean[] given;
+    private final List<String> faults = new ArrayList<>();
+
+    private PoseText(String option, Linkage linkage) {
+        this.option = option;
+        this.names = linkage.cylinders().stream().map(Cylinder::name).toList();
+        this.fractions = new double[names.size()];
+        this.given = new boolean[names.size()];
+    }
+
+    /**
+     * A pose in which every cylinder must be named.
+     *
+     * @param option name of the option the text was given to, for messages, e.g. {@code --at}
+     * @param text name=fraction pairs with commas between
+     * @return fraction of stroke of every cylinder, 0 retracted to 1 extended, in file order
+     * @throws InputException with every fault of the text
+     */
+    public static double[] fractions(String option, String text, Linkage linkage) {
+        PoseText pose = new PoseText(option, linkage);
+        pose.read(text);
+        for (int i = 0; i < pose.names.size(); i++) {
+            if (!pose.given[i]) {
+                pose.fault("cylinder " + pose.names.get(i) + " is missing; name every one of "
+                        + String.join(", ", pose.names));
+            }
+        }
+        return pose.result();
+    }
+
+    /**
+     * A pose in which cylinders that are not named stand at a given fraction.
+     *
+     * @param option name of the option the text was given to, for messages
+     * @param text name=fraction pairs with commas between; may be empty
+     * @param others fraction of stroke of the cylinders not named; no unit
+     * @return fraction of stroke of every cylinder, 0 retracted to 1 extended, in file order
+     * @throws InputException with every fault of the text
+     */
+    public static double[] fractions(String option, String text, Linkage linkage, double others) {
+        PoseText pose = new PoseText(option, linkage);
+        Arrays.fill(pose.fractions, others);
+        if (!text.isBlank()) {
+            pose.read(text);
+        }
+        return pose.result();
+    }
+
+    private double[] result() {
+        if (!faults.isEmpty()) {
+            throw new InputException(faults);
+        }
+        return fractions;
+    }
+
+    private void read(String text) {
+        for (String part : text.split(",", -1)) {
+            String pair = part.strip();
+            int equals = pair.indexOf('=');
+            if (equals < 1) {
+                fault("'" + pair + "' is not CYLINDER=FRACTION, for example " + names.get(0) + "=0.5");
+                continue;
+            }
+            set(pair.substring(0, equals).strip(), pair.substring(equals + 1).strip());
+        }
+    }
+
+    private void set(String name, String value) {
+        int index = names.indexOf(name);
+        if (index < 0) {
+            fault("no cylinder is named '" + name + "'" + Nearest.hint(name, names));
+            return;
+        }
+        if (given[index]) {
+            fault("cylinder " + name + " is given twice");
+        }
+        given[index] = true;
+        if (!NUMBER.matcher(value).matches()) {
+            fault(name + ": '" + value + "' is not a number; a fraction of stroke from 0 to 1 is wanted");
+            return;
+        }
+        double fraction = Double.parseDouble(value);
+        if (!(fraction >= 0 && fraction <= 1)) {
+            fault(name + ": " + value + " is outside 0 (retracted) to 1 (extended)");
+        }
+        fractions[index] = fraction;
+    }
+
+    private void fault(String what) {
+        faults.add(option + ": " + what);
+    }
+}
