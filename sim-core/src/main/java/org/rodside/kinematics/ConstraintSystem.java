@@ -1,6 +1,6 @@
 package org.rodside.kinematics;
 
-import org.ejml.data.DMatrixRMaj;
+import java.util.Arrays;
 
 /**
  * All pin and length equations of a linkage at once (theory K4). Unknowns: place and turn of every link (x, y, angle), then
@@ -53,26 +53,26 @@ final class ConstraintSystem {
     }
 
     /** What each equation misses at a pose; in m, overwritten. */
-    void misses(PoseBuffer pose, DMatrixRMaj out) {
+    void misses(PoseBuffer pose, double[] out) {
         int row = 0;
         for (int pin = 0; pin < mechanism.pins(); pin++) {
             for (int body : mechanism.bodiesAt(pin)) {
                 if (body != mechanism.owner(pin)) {
-                    out.data[row++] = pose.x(body, mechanism.drawnX(pin), mechanism.drawnY(pin)) - pose.pinX(pin);
-                    out.data[row++] = pose.y(body, mechanism.drawnX(pin), mechanism.drawnY(pin)) - pose.pinY(pin);
+                    out[row++] = pose.x(body, mechanism.drawnX(pin), mechanism.drawnY(pin)) - pose.pinX(pin);
+                    out[row++] = pose.y(body, mechanism.drawnX(pin), mechanism.drawnY(pin)) - pose.pinY(pin);
                 }
             }
         }
         for (int c = 0; c < mechanism.cylinders(); c++) {
             double dx = pose.pinX(mechanism.rodPin(c)) - pose.pinX(mechanism.capPin(c));
             double dy = pose.pinY(mechanism.rodPin(c)) - pose.pinY(mechanism.capPin(c));
-            out.data[row++] = Math.sqrt(dx * dx + dy * dy) - pose.length(c);
+            out[row++] = Math.sqrt(dx * dx + dy * dy) - pose.length(c);
         }
     }
 
     /** Derivative of the misses by the unknowns; overwritten. */
-    void jacobian(PoseBuffer pose, DMatrixRMaj out) {
-        out.zero();
+    void jacobian(PoseBuffer pose, double[] out) {
+        Arrays.fill(out, 0);
         int row = 0;
         for (int pin = 0; pin < mechanism.pins(); pin++) {
             for (int body : mechanism.bodiesAt(pin)) {
@@ -98,37 +98,37 @@ final class ConstraintSystem {
     }
 
     /** Adds (nx, ny)·d(point)/d(unknowns) to a row, where the point is a pin as carried by a body. */
-    private void addPoint(PoseBuffer pose, DMatrixRMaj out, int row, int pin, int body, double nx, double ny) {
+    private void addPoint(PoseBuffer pose, double[] out, int row, int pin, int body, double nx, double ny) {
         int base = row * size;
         if (body < 0) {
-            out.data[base + freeColumn[pin]] += nx;
-            out.data[base + freeColumn[pin] + 1] += ny;
+            out[base + freeColumn[pin]] += nx;
+            out[base + freeColumn[pin] + 1] += ny;
         } else if (body > 0) {
             int at = base + 3 * (body - 1);
             double rx = pose.x(body, mechanism.drawnX(pin), mechanism.drawnY(pin)) - pose.originX(body);
             double ry = pose.y(body, mechanism.drawnX(pin), mechanism.drawnY(pin)) - pose.originY(body);
-            out.data[at] += nx;
-            out.data[at + 1] += ny;
-            out.data[at + 2] += nx * -ry + ny * rx;
+            out[at] += nx;
+            out[at + 1] += ny;
+            out[at + 2] += nx * -ry + ny * rx;
         }
     }
 
     /** Right-hand side of the velocity equations; overwritten. */
-    void rateSide(double[] rates, DMatrixRMaj out) {
-        out.zero();
+    void rateSide(double[] rates, double[] out) {
+        Arrays.fill(out, 0);
         int first = size - mechanism.cylinders();
-        System.arraycopy(rates, 0, out.data, first, mechanism.cylinders());
+        System.arraycopy(rates, 0, out, first, mechanism.cylinders());
     }
 
     /** Right-hand side of the acceleration equations, with the terms in squared velocity; overwritten. */
-    void accelerationSide(PoseBuffer pose, double[] accelerations, MotionBuffer motion, DMatrixRMaj out) {
+    void accelerationSide(PoseBuffer pose, double[] accelerations, MotionBuffer motion, double[] out) {
         int row = 0;
         for (int pin = 0; pin < mechanism.pins(); pin++) {
             for (int body : mechanism.bodiesAt(pin)) {
                 int owner = mechanism.owner(pin);
                 if (body != owner) {
-                    out.data[row++] = squareX(pose, motion, pin, body) - squareX(pose, motion, pin, owner);
-                    out.data[row++] = squareY(pose, motion, pin, body) - squareY(pose, motion, pin, owner);
+                    out[row++] = squareX(pose, motion, pin, body) - squareX(pose, motion, pin, owner);
+                    out[row++] = squareY(pose, motion, pin, body) - squareY(pose, motion, pin, owner);
                 }
             }
         }
@@ -144,7 +144,7 @@ final class ConstraintSystem {
                     + uy
                             * (squareY(pose, motion, rod, mechanism.owner(rod))
                                     - squareY(pose, motion, cap, mechanism.owner(cap)));
-            out.data[row++] = accelerations[c] - across * across / pose.length(c) + bodySquares;
+            out[row++] = accelerations[c] - across * across / pose.length(c) + bodySquares;
         }
     }
 
@@ -164,26 +164,26 @@ final class ConstraintSystem {
                         * (pose.y(body, mechanism.drawnX(pin), mechanism.drawnY(pin)) - pose.originY(body));
     }
 
-    void writeRates(PoseBuffer pose, DMatrixRMaj solution, MotionBuffer motion) {
+    void writeRates(PoseBuffer pose, double[] solution, MotionBuffer motion) {
         for (int body = 1; body < mechanism.bodies(); body++) {
             int at = 3 * (body - 1);
-            motion.setRate(pose, body, solution.data[at + 2], solution.data[at], solution.data[at + 1]);
+            motion.setRate(pose, body, solution[at + 2], solution[at], solution[at + 1]);
         }
         for (int pin = 0; pin < freeColumn.length; pin++) {
             if (mechanism.owner(pin) < 0) {
-                motion.setPinRate(pin, solution.data[freeColumn[pin]], solution.data[freeColumn[pin] + 1]);
+                motion.setPinRate(pin, solution[freeColumn[pin]], solution[freeColumn[pin] + 1]);
             }
         }
     }
 
-    void writeAccelerations(PoseBuffer pose, DMatrixRMaj solution, MotionBuffer motion) {
+    void writeAccelerations(PoseBuffer pose, double[] solution, MotionBuffer motion) {
         for (int body = 1; body < mechanism.bodies(); body++) {
             int at = 3 * (body - 1);
-            motion.setAcceleration(pose, body, solution.data[at + 2], solution.data[at], solution.data[at + 1]);
+            motion.setAcceleration(pose, body, solution[at + 2], solution[at], solution[at + 1]);
         }
         for (int pin = 0; pin < freeColumn.length; pin++) {
             if (mechanism.owner(pin) < 0) {
-                motion.setPinAcceleration(pin, solution.data[freeColumn[pin]], solution.data[freeColumn[pin] + 1]);
+                motion.setPinAcceleration(pin, solution[freeColumn[pin]], solution[freeColumn[pin] + 1]);
             }
         }
     }

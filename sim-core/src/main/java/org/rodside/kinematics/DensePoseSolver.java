@@ -1,9 +1,6 @@
 package org.rodside.kinematics;
 
 import java.util.Arrays;
-import org.ejml.data.DMatrixRMaj;
-import org.ejml.dense.row.factory.LinearSolverFactory_DDRM;
-import org.ejml.interfaces.linsol.LinearSolverDense;
 
 /**
  * Newton on all pin and length equations, followed from the drawn pose (theory K4). Works for any planar linkage and is
@@ -27,16 +24,11 @@ public final class DensePoseSolver implements PoseSolver {
     /** The path is given up when its step falls below this share of the whole; no unit. */
     private static final double SMALLEST_STEP = 1e-5;
 
-    /** LU quality below which the equations are singular: a dead centre; no unit, scale-free. */
-    private static final double SINGULAR = 1e-14;
-
     private final Mechanism mechanism;
     private final ConstraintSystem system;
-    private final LinearSolverDense<DMatrixRMaj> lu;
-    private final DMatrixRMaj jacobian;
-    private final DMatrixRMaj work;
-    private final DMatrixRMaj side;
-    private final DMatrixRMaj step;
+    private final DenseEquations equations;
+    private final double[] side;
+    private final double[] step;
     private final double[] here;
     private final double[] trial;
     private final double[] strokes;
@@ -45,11 +37,9 @@ public final class DensePoseSolver implements PoseSolver {
         this.mechanism = mechanism;
         system = new ConstraintSystem(mechanism);
         int n = system.size();
-        lu = LinearSolverFactory_DDRM.lu(n);
-        jacobian = new DMatrixRMaj(n, n);
-        work = new DMatrixRMaj(n, n);
-        side = new DMatrixRMaj(n, 1);
-        step = new DMatrixRMaj(n, 1);
+        equations = new DenseEquations(n);
+        side = new double[n];
+        step = new double[n];
         here = new double[n];
         trial = new double[n];
         strokes = new double[mechanism.cylinders()];
@@ -90,14 +80,14 @@ public final class DensePoseSolver implements PoseSolver {
             pose.begin(strokes);
             system.write(trial, pose);
             system.misses(pose, side);
-            miss = largest(side.data);
+            miss = largest(side);
             if (miss > CLOSED) {
                 if (!factor(pose)) {
                     return false;
                 }
-                lu.solve(side, step);
+                equations.solve(side, step);
                 for (int i = 0; i < trial.length; i++) {
-                    trial[i] -= step.data[i];
+                    trial[i] -= step[i];
                 }
             }
         }
@@ -124,9 +114,8 @@ public final class DensePoseSolver implements PoseSolver {
 
     /** Factors the Jacobian of a pose; false where it is singular. */
     private boolean factor(PoseBuffer pose) {
-        system.jacobian(pose, jacobian);
-        work.setTo(jacobian);
-        return lu.setA(work) && lu.quality() > SINGULAR;
+        system.jacobian(pose, equations.matrix());
+        return equations.factor();
     }
 
     @Override
@@ -147,9 +136,9 @@ public final class DensePoseSolver implements PoseSolver {
 
     private void solveOrNaN(PoseBuffer pose) {
         if (factor(pose)) {
-            lu.solve(side, step);
+            equations.solve(side, step);
         } else {
-            Arrays.fill(step.data, Double.NaN);
+            Arrays.fill(step, Double.NaN);
         }
     }
 }

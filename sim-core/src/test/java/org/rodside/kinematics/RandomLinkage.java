@@ -38,8 +38,8 @@ public final class RandomLinkage {
     public static Linkage of(long seed, int cylinders) {
         RandomLinkage made = new RandomLinkage(seed);
         made.body();
-        made.newPin(0, made.spot(0, 0));
-        made.newPin(0, made.spot(0, 0));
+        made.newPin(0, made.spot(-2, 0));
+        made.newPin(0, made.spot(2, 0));
         while (made.cylinders.size() < cylinders) {
             made.addDriven();
             if (made.random.nextBoolean()) {
