@@ -1,5 +1,6 @@
 package org.rodside.study;
 
+import java.util.Arrays;
 import org.rodside.kinematics.Mechanism;
 import org.rodside.kinematics.MotionBuffer;
 import org.rodside.kinematics.PoseBuffer;
@@ -68,7 +69,7 @@ public final class FrontSolver {
      * @param out x and y part; overwritten
      */
     public void travel(Place place, int cylinder, double[] out) {
-        java.util.Arrays.fill(rates, 0);
+        Arrays.fill(rates, 0);
         rates[cylinder] = 1;
         poses.rates(pose, rates, motion);
         double x = place.x(pose);
