@@ -2,6 +2,7 @@ package org.rodside.chart;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * Finds places for short texts beside their points, so that no text covers another and, where there is room, none
@@ -14,6 +15,19 @@ final class LabelPlaceBuffer {
 
         boolean meets(Box other) {
             return left < other.right && other.left < right && top < other.bottom && other.top < bottom;
+        }
+
+        /**
+         * Where a leader from a point ends: the nearest place on the box.
+         *
+         * @return {x, y}, or nothing where the text stands so near that it needs no leader
+         */
+        Optional<double[]> leaderEnd(double x, double y) {
+            double nearX = Math.max(left, Math.min(right, x));
+            double nearY = Math.max(top, Math.min(bottom, y));
+            return Math.hypot(nearX - x, nearY - y) > NEAR
+                    ? Optional.of(new double[] {nearX, nearY})
+                    : Optional.empty();
         }
 
         double middleX() {
@@ -31,6 +45,9 @@ final class LabelPlaceBuffer {
     };
 
     private static final double[] DISTANCES = {7, 14, 24, 38, 56};
+
+    /** A text no further from its point than this needs no leader; in pixels. */
+    private static final double NEAR = 12;
 
     /** Cost of covering another text or leaving the area: more than all drawing points can add up to. */
     private static final double FORBIDDEN = 1e6;

@@ -103,6 +103,16 @@ final class PlotSeries {
         }
     }
 
+    /** A thin line from a point to the text that explains it. */
+    static void leader(XYChart chart, double[] x, double[] y) {
+        XYSeries added =
+                chart.addSeries("\u0000leader " + chart.getSeriesCollection().size(), x, y);
+        added.setMarker(SeriesMarkers.NONE)
+                .setLineColor(new Color(Palette.GREY))
+                .setLineStyle(stroke(1));
+        added.setShowInLegend(false);
+    }
+
     /** Makes the reference lines as long as the window. */
     static void spanReferences(XYChart chart, View view) {
         double[] across = {view.left(), view.right()};

@@ -5,6 +5,7 @@ import java.awt.Color;
 import java.awt.Font;
 import org.knowm.xchart.XYChart;
 import org.knowm.xchart.XYChartBuilder;
+import org.knowm.xchart.style.AxesChartStyler;
 import org.knowm.xchart.style.Styler.LegendPosition;
 import org.knowm.xchart.style.XYStyler;
 
@@ -79,6 +80,7 @@ final class PlotStyle {
         style.setPlotTicksMarksVisible(false);
         style.setXAxisTickMarkSpacingHint((int) Math.round(110 * scale(width)));
         style.setYAxisTickMarkSpacingHint((int) Math.round(64 * scale(width)));
+        style.setYAxisLabelAlignment(AxesChartStyler.TextAlignment.Right);
         style.setXAxisTickLabelsFormattingFunction(PlotStyle::tick);
         style.setYAxisTickLabelsFormattingFunction(PlotStyle::tick);
     }

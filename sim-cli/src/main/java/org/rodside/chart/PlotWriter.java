@@ -1,6 +1,5 @@
 package org.rodside.chart;
 
-import java.awt.Font;
 import java.awt.FontMetrics;
 import java.awt.Graphics2D;
 import java.awt.image.BufferedImage;
@@ -90,8 +89,7 @@ public final class PlotWriter {
     }
 
     private void labels() {
-        Font font = PlotStyle.labelFont(width);
-        FontMetrics metrics = scratch.createGraphics().getFontMetrics(font);
+        FontMetrics metrics = scratch.createGraphics().getFontMetrics(PlotStyle.labelFont(width));
         LabelPlaceBuffer.Box area = new LabelPlaceBuffer.Box(
                 chart.getScreenXFromChart(view.left()),
                 chart.getScreenYFromChart(view.top()),
@@ -101,32 +99,42 @@ public final class PlotWriter {
         double tall = metrics.getAscent() + metrics.getDescent();
         for (Mark mark : plot.marks()) {
             if (mark instanceof Mark.Level level && !level.text().isEmpty()) {
-                double wide = metrics.stringWidth(level.text()) + 8;
-                double y = chart.getScreenYFromChart(level.y());
-                text(
-                        level.text(),
-                        places,
-                        new LabelPlaceBuffer.Box(area.right() - wide - 4, y - tall, area.right() - 4, y));
+                double left = area.right() - metrics.stringWidth(level.text()) - 12;
+                double y = chart.getScreenYFromChart(level.y()) - 4;
+                taken(level.text(), places, new LabelPlaceBuffer.Box(left, y - tall, area.right() - 4, y));
             } else if (mark instanceof Mark.Upright upright && !upright.text().isEmpty()) {
-                double wide = metrics.stringWidth(upright.text()) + 8;
-                double x = chart.getScreenXFromChart(upright.x());
-                text(
+                double x = chart.getScreenXFromChart(upright.x()) + 2;
+                double right = x + metrics.stringWidth(upright.text()) + 8;
+                taken(
                         upright.text(),
                         places,
-                        new LabelPlaceBuffer.Box(x + 2, area.top() + 2, x + 2 + wide, area.top() + 2 + tall));
+                        new LabelPlaceBuffer.Box(x, area.top() + 2, right, area.top() + 2 + tall));
             }
         }
         for (Mark mark : plot.marks()) {
             if (mark instanceof Mark.Label label) {
                 double x = chart.getScreenXFromChart(label.x());
                 double y = chart.getScreenYFromChart(label.y());
-                text(label.text(), places, places.place(x, y, metrics.stringWidth(label.text()) + 4, tall));
+                double wide = metrics.stringWidth(label.text()) + 4;
+                LabelPlaceBuffer.Box box = places.place(x, y, wide, tall);
+                box.leaderEnd(x, y).ifPresent(end -> leader(label, end));
+                text(label.text(), box);
             }
         }
     }
 
-    private void text(String words, LabelPlaceBuffer places, LabelPlaceBuffer.Box box) {
+    private void leader(Mark.Label label, double[] end) {
+        double x = label.x() + (end[0] - chart.getScreenXFromChart(label.x())) / pixelsPerUnitAcross();
+        double y = label.y() - (end[1] - chart.getScreenYFromChart(label.y())) / pixelsPerUnitUp();
+        PlotSeries.leader(chart, new double[] {label.x(), x}, new double[] {label.y(), y});
+    }
+
+    private void taken(String words, LabelPlaceBuffer places, LabelPlaceBuffer.Box box) {
         places.taken(box);
+        text(words, box);
+    }
+
+    private void text(String words, LabelPlaceBuffer.Box box) {
         chart.addAnnotation(new AnnotationText(words, box.middleX(), height - box.middleY(), true));
     }
 

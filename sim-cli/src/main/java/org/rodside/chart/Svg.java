@@ -11,6 +11,7 @@ public final class Svg {
 
     private static final double TEXT = 13;
     private static final double LEGEND_ROW = 20;
+    private static final String BROKEN = "stroke-dasharray=\"7 4\"";
 
     private final Plot plot;
     private final SvgLayout layout;
@@ -30,6 +31,11 @@ public final class Svg {
         return new Svg(plot, width, height).write();
     }
 
+    /** Text made safe inside elements and attributes of an XML or HTML page. */
+    public static String escape(String raw) {
+        return SvgText.escape(raw);
+    }
+
     private static List<Series> named(Plot plot) {
         return plot.series().stream().filter(s -> !s.name().isEmpty()).toList();
     }
@@ -37,7 +43,7 @@ public final class Svg {
     private static SvgLayout layout(Plot plot, int width, int height) {
         View view = View.around(plot);
         double legend = named(plot).stream()
-                .mapToDouble(s -> 42 + SvgText.width(s.name(), TEXT))
+                .mapToDouble(s -> 50 + SvgText.width(s.name(), TEXT))
                 .max()
                 .orElse(12);
         double left = plot.y().isEmpty() ? 62 : 80;
@@ -113,30 +119,46 @@ public final class Svg {
         LabelPlaceBuffer.Box area = new LabelPlaceBuffer.Box(layout.left(), layout.top(), right, bottom);
         LabelPlaceBuffer places = new LabelPlaceBuffer(area, drawn());
         for (Mark mark : plot.marks()) {
-            SvgText.Path path = new SvgText.Path();
             if (mark instanceof Mark.Level level) {
-                double y = layout.py(level.y());
-                path.move(layout.left(), y).line(right, y);
-                double wide = SvgText.width(level.text(), TEXT);
-                places.taken(new LabelPlaceBuffer.Box(right - wide - 8, y - 20, right, y));
-                svg.stroke(path, Palette.GREY, 1.2, "stroke-dasharray=\"7 4\"");
-                svg.haloed(right - 6, y - 6, level.text(), "end", TEXT);
+                level(level, places);
             } else if (mark instanceof Mark.Upright upright) {
-                double x = layout.px(upright.x());
-                path.move(x, layout.top()).line(x, bottom);
-                double wide = SvgText.width(upright.text(), TEXT);
-                places.taken(new LabelPlaceBuffer.Box(x, layout.top(), x + wide + 8, layout.top() + 20));
-                svg.stroke(path, Palette.GREY, 1.2, "stroke-dasharray=\"7 4\"");
-                svg.haloed(x + 6, layout.top() + 14, upright.text(), "start", TEXT);
+                upright(upright, places);
             }
         }
         for (Mark mark : plot.marks()) {
             if (mark instanceof Mark.Label label) {
-                double wide = SvgText.width(label.text(), TEXT) + 4;
-                LabelPlaceBuffer.Box box = places.place(layout.px(label.x()), layout.py(label.y()), wide, TEXT + 4);
-                svg.haloed(box.middleX(), box.middleY() + 0.35 * TEXT, label.text(), "middle", TEXT);
+                label(label, places);
             }
         }
+    }
+
+    private void level(Mark.Level level, LabelPlaceBuffer places) {
+        double right = layout.left() + layout.width();
+        double y = layout.py(level.y());
+        double wide = SvgText.width(level.text(), TEXT);
+        places.taken(new LabelPlaceBuffer.Box(right - wide - 8, y - 20, right, y));
+        svg.stroke(new SvgText.Path().move(layout.left(), y).line(right, y), Palette.GREY, 1.2, BROKEN);
+        svg.haloed(right - 6, y - 6, level.text(), "end", TEXT);
+    }
+
+    private void upright(Mark.Upright upright, LabelPlaceBuffer places) {
+        double x = layout.px(upright.x());
+        double top = layout.top();
+        double wide = SvgText.width(upright.text(), TEXT);
+        places.taken(new LabelPlaceBuffer.Box(x, top, x + wide + 8, top + 20));
+        svg.stroke(new SvgText.Path().move(x, top).line(x, top + layout.height()), Palette.GREY, 1.2, BROKEN);
+        svg.haloed(x + 6, top + 14, upright.text(), "start", TEXT);
+    }
+
+    private void label(Mark.Label label, LabelPlaceBuffer places) {
+        double x = layout.px(label.x());
+        double y = layout.py(label.y());
+        LabelPlaceBuffer.Box box = places.place(x, y, SvgText.width(label.text(), TEXT) + 4, TEXT + 4);
+        box.leaderEnd(x, y).ifPresent(end -> {
+            SvgText.Path leader = new SvgText.Path().move(x, y).line(end[0], end[1]);
+            svg.stroke(leader, Palette.GREY, 1, "");
+        });
+        svg.haloed(box.middleX(), box.middleY() + 0.35 * TEXT, label.text(), "middle", TEXT);
     }
 
     private List<double[]> drawn() {

@@ -60,11 +60,26 @@ final class SvgText {
         return sign + size / 10 + (size % 10 == 0 ? "" : "." + size % 10);
     }
 
+    /** Text made safe inside elements and attributes; letters that XML does not allow become a question mark. */
     static String escape(String raw) {
-        return raw.replace("&", "&amp;")
-                .replace("<", "&lt;")
-                .replace(">", "&gt;")
-                .replace("\"", "&quot;");
+        StringBuilder safe = new StringBuilder(raw.length() + 16);
+        raw.codePoints().forEach(c -> {
+            switch (c) {
+                case '&' -> safe.append("&amp;");
+                case '<' -> safe.append("&lt;");
+                case '>' -> safe.append("&gt;");
+                case '"' -> safe.append("&quot;");
+                case '\'' -> safe.append("&#39;");
+                default -> safe.appendCodePoint(allowed(c) ? c : '?');
+            }
+        });
+        return safe.toString();
+    }
+
+    private static boolean allowed(int c) {
+        boolean control = c < 0x20 && c != '\t' && c != '\n' && c != '\r';
+        boolean half = c >= 0xD800 && c <= 0xDFFF;
+        return !control && !half && c != 0xFFFE && c != 0xFFFF;
     }
 
     private static String colour(int rgb) {

@@ -6,18 +6,21 @@ import java.util.BitSet;
 /** Leaves out points that a picture cannot show, so that a long recording makes a small file and no other picture. */
 final class Thinning {
 
+    /** Side of a cell in which one point stands for all; in pixels; half of the smallest symbol. */
+    private static final int CELL = 3;
+
     private Thinning() {}
 
     /**
      * What of a series is worth drawing on an area of so many pixels: lines that run to the right keep first, lowest,
-     * highest and last point of every pixel column, clouds keep the last point of every cell of two pixels, other
+     * highest and last point of every pixel column, clouds keep the last point of every cell of three pixels, other
      * lines stay as they are.
      *
      * @return x and y of the points kept, in order; a point with NaN marks a gap in a line
      */
     static double[][] of(Series series, View view, int width, int height) {
         if (series.pointsOnly()) {
-            return cloud(series, view, (width + 1) / 2, (height + 1) / 2);
+            return cloud(series, view, (width + 2) / CELL, (height + 2) / CELL);
         }
         boolean longer = series.x().length > 4 * width;
         return longer && series.style() != Series.Style.FILL && runsRight(series.x())

@@ -7,7 +7,7 @@ import java.nio.file.AccessDeniedException;
 import java.nio.file.FileSystemException;
 import java.nio.file.NoSuchFileException;
 import java.util.List;
-import org.rodside.io.Nearest;
+import org.rodside.io.NearestName;
 import org.rodside.model.InputException;
 import picocli.CommandLine;
 import picocli.CommandLine.IExecutionExceptionHandler;
@@ -84,12 +84,12 @@ final class ExitStatus implements IExecutionExceptionHandler, IParameterExceptio
                     .filter(option -> !option.hidden())
                     .map(option -> option.longestName())
                     .toList();
-            return "there is no option " + name + Nearest.hint(name, known);
+            return "there is no option " + name + "; " + NearestName.advice(name, known);
         }
         return command.getSubcommands().isEmpty()
                 ? "'" + found + "' is one argument too many"
-                : "there is no command '" + found + "'"
-                        + Nearest.hint(found, command.getSubcommands().keySet());
+                : "there is no command '" + found + "'; "
+                        + NearestName.advice(found, command.getSubcommands().keySet());
     }
 
     private static String fileFault(IOException e) {

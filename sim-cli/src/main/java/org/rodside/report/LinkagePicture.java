@@ -98,7 +98,8 @@ public final class LinkagePicture {
         double right = Math.max(most(pose.pins().x()), pose.machine().front().orElse(0)) + 6 * radius;
         List<Double> x = new ArrayList<>(List.of(left, right));
         List<Double> y = new ArrayList<>(List.of(0.0, 0.0));
-        for (OptionalDouble line : List.of(pose.machine().front(), pose.machine().rear())) {
+        for (OptionalDouble line :
+                List.of(pose.machine().front(), pose.machine().rear())) {
             if (line.isPresent()) {
                 double at = line.getAsDouble();
                 x.addAll(List.of(Double.NaN, at, at - radius, at + radius, at));
@@ -106,7 +107,8 @@ public final class LinkagePicture {
             }
         }
         Cloud line = scaled(new Cloud(
-                x.stream().mapToDouble(v -> v).toArray(), y.stream().mapToDouble(v -> v).toArray()));
+                x.stream().mapToDouble(v -> v).toArray(),
+                y.stream().mapToDouble(v -> v).toArray()));
         return Series.line("", Palette.GREY, line.x(), line.y());
     }
 

@@ -18,9 +18,9 @@ final class Outline {
         for (int i = 0; i < places.x().length; i++) {
             for (int k = 0; k < CORNERS; k++) {
                 double angle = 2 * Math.PI * k / CORNERS;
-                points.add(new double[] {
-                    places.x()[i] + radius * Math.cos(angle), places.y()[i] + radius * Math.sin(angle)
-                });
+                points.add(
+                        new double[] {places.x()[i] + radius * Math.cos(angle), places.y()[i] + radius * Math.sin(angle)
+                        });
             }
         }
         return hull(points);

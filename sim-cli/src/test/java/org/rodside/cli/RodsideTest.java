@@ -151,7 +151,9 @@ class RodsideTest {
     void aMisspeltOptionIsAnsweredWithTheNearest() {
         assertEquals(2, probe(() -> "", "x.json", "--unit", "us"));
         assertEquals(
-                List.of("rodside: there is no option --unit; did you mean --units?", "Try: rodside probe --help"),
+                List.of(
+                        "rodside: there is no option --unit; the nearest right one is --units",
+                        "Try: rodside probe --help"),
                 err.toString().lines().toList());
     }
 
@@ -159,7 +161,7 @@ class RodsideTest {
     void aMisspeltCommandIsAnsweredWithTheNearest() {
         assertEquals(2, run("prbe"));
         assertEquals(
-                List.of("rodside: there is no command 'prbe'; did you mean probe?", "Try: rodside --help"),
+                List.of("rodside: there is no command 'prbe'; the nearest right one is probe", "Try: rodside --help"),
                 err.toString().lines().toList());
     }
 

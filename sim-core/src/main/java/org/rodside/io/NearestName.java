@@ -6,7 +6,7 @@ import java.util.Locale;
 import java.util.Optional;
 
 /** Finds the right name that a misspelt one most likely meant. */
-final class NearestName {
+public final class NearestName {
 
     /** A name may differ from the right one by half of its letters, and always by two; further off is no likeness. */
     private static final int ALWAYS_ALLOWED = 2;
@@ -17,7 +17,7 @@ final class NearestName {
     private NearestName() {}
 
     /** The nearest of the right names by edit distance (capitals and the kind of dash do not count), if any is near. */
-    static Optional<String> of(String wrong, Collection<String> right) {
+    public static Optional<String> of(String wrong, Collection<String> right) {
         String plainWrong = plain(wrong);
         int allowed = Math.max(ALWAYS_ALLOWED, plainWrong.length() / 2);
         String best = null;
@@ -34,7 +34,7 @@ final class NearestName {
     }
 
     /** Words for an error: the nearest right name, or the whole list where none is near. */
-    static String advice(String wrong, Collection<String> right) {
+    public static String advice(String wrong, Collection<String> right) {
         return of(wrong, right)
                 .map(name -> "the nearest right one is " + name)
                 .orElseGet(() -> "known are " + shown(right));

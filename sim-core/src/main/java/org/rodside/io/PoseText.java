@@ -87,7 +87,7 @@ public final class PoseText {
     private void set(String name, String value) {
         int index = names.indexOf(name);
         if (index < 0) {
-            fault("no cylinder is named '" + name + "'" + Nearest.hint(name, names));
+            fault("no cylinder is named '" + name + "'; " + NearestName.advice(name, names));
             return;
         }
         if (given[index]) {

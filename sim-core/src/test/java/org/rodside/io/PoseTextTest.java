@@ -32,7 +32,7 @@ class PoseTextTest {
                 InputException.class, () -> PoseText.fractions("--at", "bom=0.5,boom=1.2,boom=0.3,x", FRONT));
         assertEquals(
                 List.of(
-                        "--at: no cylinder is named 'bom'; did you mean boom?",
+                        "--at: no cylinder is named 'bom'; the nearest right one is boom",
                         "--at: boom: 1.2 is outside 0 (retracted) to 1 (extended)",
                         "--at: cylinder boom is given twice",
                         "--at: 'x' is not CYLINDER=FRACTION, for example boom=0.5",
@@ -61,16 +61,6 @@ class PoseTextTest {
     void cylindersNotNamedMayTakeADefault() {
         assertArrayEquals(new double[] {0.5, 0.2, 0.5}, PoseText.fractions("--at", "stick=0.2", FRONT, 0.5));
         assertArrayEquals(new double[] {0.5, 0.5, 0.5}, PoseText.fractions("--at", "", FRONT, 0.5));
-    }
-
-    @Test
-    void theNearestNameIsTheOneWithFewestChanges() {
-        List<String> known = List.of("boom", "stick", "bucket", "boom-foot");
-        assertEquals(Optional.of("boom"), Nearest.to("bomo", known));
-        assertEquals(Optional.of("bucket"), Nearest.to("Buket", known));
-        assertEquals(Optional.of("boom-foot"), Nearest.to("boom_foot", known));
-        assertEquals(Optional.empty(), Nearest.to("ladder", known));
-        assertEquals("; right would be one of boom, stick, bucket, boom-foot", Nearest.hint("ladder", known));
     }
 
     private static Linkage front(String... names) {
