@@ -18,7 +18,7 @@ public final class Palette {
     public static final int WHITE = 0xFFFFFF;
 
     private static final int[] CATEGORIES = {
-        0x2153AB, 0xEE6748, 0x1B967F, 0x704027, 0x7A4B86, 0x4C760A, 0x3E3E47, 0x5189CD
+        0x2153AB, 0xEE6748, 0x1B967F, 0x704027, 0x7A4B86, 0x4A7209, 0x3E3E47, 0x5189CD
     };
 
     private static final int[] SHADES = {

@@ -113,14 +113,17 @@ public final class PlotWriter {
         }
         for (Mark mark : plot.marks()) {
             if (mark instanceof Mark.Label label) {
-                double x = chart.getScreenXFromChart(label.x());
-                double y = chart.getScreenYFromChart(label.y());
-                double wide = metrics.stringWidth(label.text()) + 4;
-                LabelPlaceBuffer.Box box = places.place(x, y, wide, tall);
-                box.leaderEnd(x, y).ifPresent(end -> leader(label, end));
-                text(label.text(), box);
+                label(label, places, metrics.stringWidth(label.text()) + 4, tall);
             }
         }
+    }
+
+    private void label(Mark.Label label, LabelPlaceBuffer places, double wide, double tall) {
+        double x = chart.getScreenXFromChart(label.x());
+        double y = chart.getScreenYFromChart(label.y());
+        LabelPlaceBuffer.Box box = places.place(x, y, wide, tall);
+        box.leaderEnd(x, y).ifPresent(end -> leader(label, end));
+        text(label.text(), box);
     }
 
     private void leader(Mark.Label label, double[] end) {

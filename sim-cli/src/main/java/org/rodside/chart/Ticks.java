@@ -27,9 +27,9 @@ public final class Ticks {
         for (int p = power; ; p++) {
             for (int digit : new int[] {1, 2, 5}) {
                 double step = p < 0 ? digit / Math.pow(10, -p) : digit * Math.pow(10, p);
-                // A thousandth of a step: an end that misses a round value by rounding only still shows it.
-                long first = (long) Math.ceil(low / step - 1e-3);
-                long last = (long) Math.floor(high / step + 1e-3);
+                // A trace of a step: an end that misses a round value by rounding only still shows it.
+                long first = (long) Math.ceil(low / step - 1e-9);
+                long last = (long) Math.floor(high / step + 1e-9);
                 if (last - first < most) {
                     return new Ticks(step, Math.max(0, -p), spread(first, last, digit, p));
                 }

