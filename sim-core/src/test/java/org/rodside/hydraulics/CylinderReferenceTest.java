@@ -10,6 +10,8 @@ import static org.rodside.units.Unit.PSI;
 import static org.rodside.units.Unit.SQUARE_CENTIMETRE;
 import static org.rodside.units.Unit.SQUARE_INCH;
 
+import java.util.List;
+import java.util.stream.Collectors;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -142,7 +144,28 @@ class CylinderReferenceTest {
         CylinderLimits limits = CylinderLimits.of(Cylinders.pair(), false);
         CylinderArea area = CylinderArea.of(Cylinders.pair());
         assertEquals(2 * 280e5 * area.cap(), limits.holdingPush());
-        assertEquals(2 * 280e5 * area.rod(), limits.holdingPull());
+        assertEquals(2 * 300e5 * area.rod(), limits.holdingPull());
         assertTrue(limits.holdingPush() > limits.drivingPush(), "holds more than it drives");
+    }
+
+    /** ISO 3320 (memory), in mm, second-choice bores in brackets as the standard prints them. */
+    @Test
+    void preferredSizes() {
+        String bores =
+                "25 32 40 50 63 80 (90) 100 (110) 125 (140) 160 (180) 200 (220) 250 (280) 320 (360) 400 (450) 500";
+        String rods =
+                "12 14 16 18 20 22 25 28 32 36 40 45 50 56 63 70 80 90 100 110 125 140 160 180 200 220 250 280 320 360";
+        assertEquals(bores, spelt(PreferredSizes.BORES));
+        assertEquals(rods, spelt(PreferredSizes.RODS).replaceAll("[()]", ""));
+    }
+
+    private static String spelt(List<Double> sizes) {
+        return sizes.stream()
+                .map(d -> PreferredSizes.SECOND_CHOICE_BORES.contains(d) ? "(" + mm(d) + ")" : mm(d))
+                .collect(Collectors.joining(" "));
+    }
+
+    private static String mm(double metres) {
+        return Long.toString(Math.round(metres * 1000));
     }
 }

@@ -23,9 +23,26 @@ final class Cylinders {
         return make(bore, rod, count, back, friction, tube);
     }
 
-    /** A pair in parallel with everything in it: back pressure on both sides, constant and shared friction. */
+    /** A pair in parallel with everything in it and no two pressures alike: 250/230, relief 280/300, back 3/5 bar. */
     static Cylinder pair() {
-        return with(0.125, 0.090, 2, new Sides(3e5, 5e5), new Friction(1600, 0.02));
+        Cylinder even = with(0.125, 0.090, 2, new Sides(3e5, 5e5), new Friction(1600, 0.02));
+        return new Cylinder(
+                even.name(),
+                even.capPin(),
+                even.rodPin(),
+                even.count(),
+                even.bore(),
+                even.rod(),
+                even.retracted(),
+                even.stroke(),
+                new Sides(250e5, 230e5),
+                new Sides(280e5, 300e5),
+                even.back(),
+                even.friction(),
+                even.mass(),
+                even.harderShare(),
+                even.tube(),
+                even.yield());
     }
 
     static Cylinder column(double bore, double rod, Tube tube) {
