@@ -65,6 +65,26 @@ public final class PoseText {
         return pose.result();
     }
 
+    /** A pose of a linkage as it would be typed, for messages. */
+    public static String example(Linkage linkage) {
+        return String.join(
+                ",", linkage.cylinders().stream().map(c -> c.name() + "=0.5").toList());
+    }
+
+    /**
+     * Index of a cylinder typed by name.
+     *
+     * @throws InputException where no cylinder has the name, with the nearest one
+     */
+    public static int cylinder(String option, String name, Linkage linkage) {
+        List<String> names = linkage.cylinders().stream().map(Cylinder::name).toList();
+        if (!names.contains(name)) {
+            throw new InputException(
+                    option + ": no cylinder is named '" + name + "'; " + NearestName.advice(name, names));
+        }
+        return names.indexOf(name);
+    }
+
     private double[] result() {
         if (!faults.isEmpty()) {
             throw new InputException(faults);
