@@ -264,7 +264,7 @@ public final class PoseReport {
 
     /** The pose as a picture. */
     public Plot plot() {
-        return new LinkagePicture(Posed.of(pose), units).plot(linkage.name());
+        return new LinkagePicture(PoseDrawing.of(pose), units).plot(linkage.name());
     }
 
     /** Writes the picture {@code pose.png}. */
