@@ -61,7 +61,7 @@ class HouseMapTest {
             // Beyond chart, study and table: a drawing of a linkage is made from pins (model), places (kinematics) and
             // lengths (units) as the studies hand them out; copying them into a second set of types would only hide
             // that.
-            Map.entry("report", Set.of("chart", "study", "table", "model", "kinematics", "units")),
+            Map.entry("report", Set.of("chart", "study", "table", "model", "kinematics", "units", "io", "statics")),
             Map.entry("cli", ALL));
 
     /** Library to the packages that may use it. */
