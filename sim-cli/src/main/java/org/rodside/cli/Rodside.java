@@ -19,7 +19,7 @@ import picocli.CommandLine.Spec;
         versionProvider = Version.class,
         mixinStandardHelpOptions = true,
         synopsisSubcommandLabel = "COMMAND",
-        subcommands = {PoseCommand.class},
+        subcommands = {PoseCommand.class, DigCommand.class},
         footer = {
             "",
             "Example:",

@@ -14,6 +14,9 @@ import org.rodside.units.UnitSystem;
  */
 public final class PageWriter {
 
+    /** Height of a drawing of a linkage as a share of the page's width. */
+    public static final double DRAWING = 0.68;
+
     private static final int FIGURE_WIDTH = 860;
 
     private static final String STYLE = """
