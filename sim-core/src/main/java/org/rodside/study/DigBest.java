@@ -3,6 +3,9 @@ package org.rodside.study;
 /** Largest forces met in a part of a sweep; the first of equals. Parts are added in order. Not thread-safe. */
 final class DigBest {
 
+    /** A force of this size or more means that nothing limits it; in N. */
+    static final double UNLIMITED = 1e200;
+
     long assembled;
     double curl = Double.NEGATIVE_INFINITY;
     long curlPose = -1;
@@ -14,12 +17,12 @@ final class DigBest {
         for (int i = 0; i < run.curl.length; i++) {
             double force = run.curl[i];
             assembled += force == force ? 1 : 0;
-            if (force > curl && force < Double.POSITIVE_INFINITY) {
+            if (force > curl && force < UNLIMITED) {
                 curl = force;
                 curlPose = first + i;
             }
             double other = run.crowd[i];
-            if (other > crowd && other < Double.POSITIVE_INFINITY) {
+            if (other > crowd && other < UNLIMITED) {
                 crowd = other;
                 crowdPose = first + i;
             }

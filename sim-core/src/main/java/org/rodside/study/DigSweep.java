@@ -34,6 +34,7 @@ public final class DigSweep {
     private final boolean ideal;
     private final SweepGrid grid;
     private final int cylinders;
+    private final Optional<StageSweep> stages;
 
     /**
      * @param front the front
@@ -47,7 +48,7 @@ public final class DigSweep {
         this.ideal = ideal;
         grid = new SweepGrid(front.mechanism(), steps);
         cylinders = front.mechanism().cylinders();
-        edge.of(front);
+        stages = StageSweep.of(front, grid, edge.of(front));
     }
 
     /**
@@ -120,7 +121,9 @@ public final class DigSweep {
     }
 
     private DigLine line() {
-        return new GeneralDigLine(grid, front, edge, ideal);
+        return stages.isPresent()
+                ? new StageDigLine(stages.get(), ideal)
+                : new GeneralDigLine(grid, front, edge, ideal);
     }
 
     private IntFunction<DigBest> bestWorker(int linesAPiece) {
