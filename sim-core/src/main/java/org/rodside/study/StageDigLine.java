@@ -57,13 +57,7 @@ final class StageDigLine implements DigLine {
         pull = new double[n];
         drivingPush = new double[n];
         drivingPull = new double[n];
-        for (int k = 0; k < n; k++) {
-            CylinderLimits limits = made.limits(sweep.cylinder(k), ideal);
-            push[k] = limits.holdingPush();
-            pull[k] = limits.holdingPull();
-            drivingPush[k] = limits.drivingPush();
-            drivingPull[k] = limits.drivingPull();
-        }
+        capacities(made);
         fixed = new double[steps];
         unit1 = new double[steps];
         unit2 = new double[steps];
@@ -71,6 +65,16 @@ final class StageDigLine implements DigLine {
         room2 = new double[steps];
         load1 = new double[steps];
         load2 = new double[steps];
+    }
+
+    private void capacities(Front made) {
+        for (int k = 0; k < push.length; k++) {
+            CylinderLimits limits = made.limits(sweep.cylinder(k), ideal);
+            push[k] = limits.holdingPush();
+            pull[k] = limits.holdingPull();
+            drivingPush[k] = limits.drivingPush();
+            drivingPull[k] = limits.drivingPull();
+        }
     }
 
     private void begin(int[] outer) {
