@@ -19,7 +19,7 @@ import picocli.CommandLine.Spec;
         versionProvider = Version.class,
         mixinStandardHelpOptions = true,
         synopsisSubcommandLabel = "COMMAND",
-        subcommands = {PoseCommand.class, DigCommand.class},
+        subcommands = {PoseCommand.class, DigCommand.class, CyclesCommand.class},
         footer = {
             "",
             "Example:",

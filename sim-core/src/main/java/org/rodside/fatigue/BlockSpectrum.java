@@ -34,21 +34,12 @@ public record BlockSpectrum(List<Level> levels, double leftOut, CycleTable full)
      * @throws IllegalArgumentException where a mean reaches the strength of the rule
      */
     public static BlockSpectrum of(CycleTable table, MeanRule rule) {
-        List<CycleTable.Row> rows = new ArrayList<>();
-        double largest = 0;
-        for (CycleTable.Row r : table.rows()) {
-            double range = rule.range(r.range(), r.mean());
-            if (Double.isInfinite(range)) {
-                throw new IllegalArgumentException(
-                        "a mean of " + r.mean() + " reaches the strength of " + rule.strength());
-            }
-            largest = Math.max(largest, range);
-            rows.add(new CycleTable.Row(range, rule.mean(r.mean()), r.count()));
-        }
+        CycleTable full = treated(table, rule);
+        double largest = full.maxRange();
         double[] counts = new double[SHARES.length];
         double[] means = new double[SHARES.length];
         double leftOut = 0;
-        for (CycleTable.Row r : rows) {
+        for (CycleTable.Row r : full.rows()) {
             int level = level(r.range() / largest);
             if (level < 0) {
                 leftOut += r.count();
@@ -62,7 +53,20 @@ public record BlockSpectrum(List<Level> levels, double leftOut, CycleTable full)
             double mean = counts[i] > 0 ? means[i] / counts[i] : 0;
             levels.add(new Level(SHARES[i], SHARES[i] * largest, mean, counts[i]));
         }
-        return new BlockSpectrum(List.copyOf(levels), leftOut, CycleTable.sorted(rows, table.width()));
+        return new BlockSpectrum(List.copyOf(levels), leftOut, full);
+    }
+
+    private static CycleTable treated(CycleTable table, MeanRule rule) {
+        List<CycleTable.Row> rows = new ArrayList<>();
+        for (CycleTable.Row r : table.rows()) {
+            double range = rule.range(r.range(), r.mean());
+            if (Double.isInfinite(range)) {
+                throw new IllegalArgumentException(
+                        "a mean of " + r.mean() + " reaches the strength of " + rule.strength());
+            }
+            rows.add(new CycleTable.Row(range, rule.mean(r.mean()), r.count()));
+        }
+        return CycleTable.sorted(rows, table.width());
     }
 
     private static int level(double share) {

@@ -32,6 +32,16 @@ public record RangeMeanMatrix(double[][] counts, double rangeStep, double meanLo
         return new RangeMeanMatrix(counts, rangeStep, low, meanStep);
     }
 
+    /** Where a range class starts, and the one before ends; unit of the signal. */
+    public double rangeFrom(int i) {
+        return i * rangeStep;
+    }
+
+    /** Where a mean class starts, and the one before ends; unit of the signal. */
+    public double meanFrom(int j) {
+        return meanLow + j * meanStep;
+    }
+
     private static int place(double value, double step, int bins) {
         return step > 0 ? (int) Math.min(bins - 1, Math.floor(value / step)) : 0;
     }
