@@ -19,7 +19,7 @@ import picocli.CommandLine.Spec;
         versionProvider = Version.class,
         mixinStandardHelpOptions = true,
         synopsisSubcommandLabel = "COMMAND",
-        subcommands = {PoseCommand.class, DigCommand.class, CyclesCommand.class},
+        subcommands = {PoseCommand.class, DigCommand.class, CyclesCommand.class, StudyCommand.class},
         footer = {
             "",
             "Example:",

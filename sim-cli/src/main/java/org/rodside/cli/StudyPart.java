@@ -1,0 +1,27 @@
+package org.rodside.cli;
+
+import java.nio.file.Path;
+import java.util.Map;
+import java.util.Optional;
+import org.rodside.report.PageWriter;
+import org.rodside.study.Front;
+
+/** One question among those that {@code study} asks: computes, writes its files, adds its section to the page. */
+interface StudyPart {
+
+    /** What a part works on. {@code folder} is empty where no files are wanted. */
+    record Desk(Front front, CommonOptions common, Optional<Path> folder, PageWriter page) {}
+
+    /** What a part found: a JSON tree, and text for the one-page summary. */
+    record Told(Map<String, Object> json, String text) {}
+
+    /** Name of the part, that of the command which asks it alone. */
+    String name();
+
+    /**
+     * Answers.
+     *
+     * @throws org.rodside.model.InputException where the linkage file lacks what the question needs
+     */
+    Told tell(Desk desk);
+}
