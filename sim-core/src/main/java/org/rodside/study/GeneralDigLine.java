@@ -10,15 +10,16 @@ final class GeneralDigLine implements DigLine {
     private final FrontSolver solver;
     private final DigSolver curl;
     private final DigSolver crowd;
-    private final Place edge;
+    private final Place tip;
     private final double[] fractions;
 
     GeneralDigLine(SweepGrid grid, Front front, Edge edge, boolean ideal) {
         this.grid = grid;
-        this.edge = edge.of(front);
+        tip = front.tip();
+        Place place = edge.of(front);
         solver = new FrontSolver(front);
-        curl = new DigSolver(solver, this.edge, front.curl(), ideal);
-        crowd = front.crowd() < 0 ? null : new DigSolver(solver, this.edge, front.crowd(), ideal);
+        curl = new DigSolver(solver, place, front.curl(), ideal);
+        crowd = front.crowd() < 0 ? null : new DigSolver(solver, place, front.crowd(), ideal);
         fractions = new double[front.mechanism().cylinders()];
     }
 
@@ -34,8 +35,8 @@ final class GeneralDigLine implements DigLine {
         for (int i = 0; i < grid.steps(); i++) {
             grid.fractions(outer, i, fractions);
             boolean stands = solver.place(fractions) == PoseSolver.ASSEMBLED;
-            out.tipX[i] = edge.x(solver.pose());
-            out.tipY[i] = edge.y(solver.pose());
+            out.tipX[i] = tip.x(solver.pose());
+            out.tipY[i] = tip.y(solver.pose());
             out.curl[i] = stands ? curl.force() : Double.NaN;
             out.curlLimit[i] = stands ? curl.governing() : LimitSolver.NONE;
             if (crowd != null) {

@@ -240,8 +240,8 @@ final class StageDigLine implements DigLine {
         double c = line.cos();
         double s = line.sin();
         for (int i = 0; i < steps; i++) {
-            out.tipX[i] = line.x() + c * table.edgeX[i] - s * table.edgeY[i];
-            out.tipY[i] = line.y() + s * table.edgeX[i] + c * table.edgeY[i];
+            out.tipX[i] = line.x() + c * table.tipX[i] - s * table.tipY[i];
+            out.tipY[i] = line.y() + s * table.tipX[i] + c * table.tipY[i];
         }
         named(curl, out.curl, out.curlLimit);
         if (crowd == null) {

@@ -49,6 +49,11 @@ final class StageTable {
 
     final double[] edgeY;
 
+    /** Place of the tip if the output link is the tool; in m. */
+    final double[] tipX;
+
+    final double[] tipY;
+
     /** Travel of the cutting edge for each stroke; no unit. */
     final double[] edgeTravelX;
 
@@ -72,6 +77,8 @@ final class StageTable {
         carryY = new double[n];
         edgeX = new double[n];
         edgeY = new double[n];
+        tipX = new double[n];
+        tipY = new double[n];
         edgeTravelX = new double[n];
         edgeTravelY = new double[n];
         fill(front, stage, grid, edge);
@@ -118,6 +125,8 @@ final class StageTable {
             carryY,
             edgeX,
             edgeY,
+            tipX,
+            tipY,
             edgeTravelX,
             edgeTravelY
         };
@@ -158,6 +167,11 @@ final class StageTable {
             double ey = pose.y(output, edge.x(), edge.y());
             edgeX[i] = localX(ex, ey);
             edgeY[i] = localY(ex, ey);
+            Place tip = front.tip();
+            double tx = tip.x(pose);
+            double ty = tip.y(pose);
+            tipX[i] = localX(tx, ty);
+            tipY[i] = localY(tx, ty);
             edgeTravelX[i] = along(motion.vx(pose, output, ex, ey), motion.vy(pose, output, ex, ey));
             edgeTravelY[i] = across(motion.vx(pose, output, ex, ey), motion.vy(pose, output, ex, ey));
         }
