@@ -19,7 +19,8 @@ import picocli.CommandLine.Spec;
         versionProvider = Version.class,
         mixinStandardHelpOptions = true,
         synopsisSubcommandLabel = "COMMAND",
-        subcommands = {PoseCommand.class, DigCommand.class, CyclesCommand.class, StudyCommand.class},
+        subcommands = {PoseCommand.class, DigCommand.class, LoadsCommand.class, CyclesCommand.class, StudyCommand.class
+        },
         footer = {
             "",
             "Example:",

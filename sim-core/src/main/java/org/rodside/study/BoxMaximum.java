@@ -72,9 +72,21 @@ public final class BoxMaximum {
 
     /** Finds the largest value. */
     public Optimum find(Objective objective) {
-        double[] values = gridValues(objective);
+        return findFrom(gridValues(objective), objective);
+    }
+
+    /**
+     * Finds the largest value of a function whose values on the grid are known.
+     *
+     * @param values value at every {@link #point}; not modified
+     * @param objective the same function
+     */
+    public Optimum findFrom(double[] values, Objective objective) {
         Optimum best = new Optimum(Double.NaN, start);
         for (int cell : hills(values)) {
+            if (best.exists() && values[cell] + 2 * drop(values, cell) <= best.value()) {
+                continue;
+            }
             Optimum top = climb(objective, new Optimum(values[cell], point(cell)));
             if (!best.exists() || top.value() > best.value()) {
                 best = top;
@@ -88,7 +100,8 @@ public final class BoxMaximum {
         return climb(objective, new Optimum(objective.at(fractions), fractions.clone()));
     }
 
-    private int cells() {
+    /** Number of grid points. */
+    public int cells() {
         int cells = 1;
         for (int i = 0; i < free.length; i++) {
             cells *= grid;
@@ -96,7 +109,13 @@ public final class BoxMaximum {
         return cells;
     }
 
-    private double[] point(int cell) {
+    /** Number of grid points that differ in all but the last free stroke: a fair piece of work. */
+    public int cellsInASlice() {
+        return cells() / grid;
+    }
+
+    /** Fractions of a grid point. */
+    public double[] point(int cell) {
         double[] point = start.clone();
         int rest = cell;
         for (int axis : free) {
@@ -114,31 +133,44 @@ public final class BoxMaximum {
         return values;
     }
 
-    /** Grid points not lower than any neighbour, the highest first. */
+    /**
+     * Grid points not lower than any neighbour whose top could still be the highest, the highest first. Between a grid hill
+     * and its neighbours a smooth function rises above the hill by less than it falls to the lowest of them; twice that is
+     * allowed for kinks.
+     */
     private List<Integer> hills(double[] values) {
         List<Integer> hills = new ArrayList<>();
+        double highest = Double.NEGATIVE_INFINITY;
         for (int cell = 0; cell < values.length; cell++) {
-            if (!Double.isNaN(values[cell]) && !hasHigherNeighbour(values, cell)) {
+            if (!Double.isNaN(values[cell]) && drop(values, cell) >= 0) {
                 hills.add(cell);
+                highest = Math.max(highest, values[cell]);
             }
         }
+        double bar = highest;
+        hills.removeIf(cell -> values[cell] + 2 * drop(values, cell) < bar);
         hills.sort(Comparator.comparingDouble((Integer cell) -> -values[cell]));
         return hills.subList(0, Math.min(CLIMBS, hills.size()));
     }
 
-    private boolean hasHigherNeighbour(double[] values, int cell) {
+    /** How far the lowest neighbour along an axis lies below a grid point; negative where one lies above. */
+    private double drop(double[] values, int cell) {
         int stride = 1;
         int rest = cell;
+        double drop = 0;
         for (int i = 0; i < free.length; i++) {
             int place = rest % grid;
             rest /= grid;
-            if (place > 0 && values[cell - stride] > values[cell]
-                    || place < grid - 1 && values[cell + stride] > values[cell]) {
-                return true;
+            double before = place > 0 ? values[cell - stride] : Double.NaN;
+            double after = place < grid - 1 ? values[cell + stride] : Double.NaN;
+            if (before > values[cell] || after > values[cell]) {
+                return -1;
             }
+            drop = before < values[cell] ? Math.max(drop, values[cell] - before) : drop;
+            drop = after < values[cell] ? Math.max(drop, values[cell] - after) : drop;
             stride *= grid;
         }
-        return false;
+        return drop;
     }
 
     private Optimum climb(Objective objective, Optimum from) {

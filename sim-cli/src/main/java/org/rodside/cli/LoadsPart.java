@@ -1,0 +1,29 @@
+package org.rodside.cli;
+
+import org.rodside.report.LoadsReport;
+import org.rodside.study.LoadsAnswer;
+import org.rodside.study.WorstLoads;
+
+/** Worst loads as part of {@code study}. */
+final class LoadsPart implements StudyPart {
+
+    @Override
+    public String name() {
+        return "loads";
+    }
+
+    @Override
+    public Told tell(Desk desk) {
+        LoadsAnswer answer = WorstLoads.find(
+                desk.front(),
+                WorstLoads.usualCases(desk.front(), WorstLoads.USUAL_DENSITY),
+                desk.common().threads(),
+                done -> {});
+        LoadsReport report = new LoadsReport(desk.front(), answer, desk.common().units());
+        desk.folder().ifPresent(folder -> {
+            report.files(folder);
+            report.section(desk.page());
+        });
+        return new Told(report.json(), report.text());
+    }
+}

@@ -1,0 +1,80 @@
+package org.rodside.study;
+
+import org.rodside.kinematics.PoseBuffer;
+import org.rodside.kinematics.PoseSolver;
+import org.rodside.model.Linkage;
+import org.rodside.statics.ForceBuffer;
+
+/** Forces of one load case at any pose. Owns its scratch; one per thread. */
+final class CaseSolver {
+
+    private final FrontSolver solver;
+    private final LoadCase load;
+    private final DigSolver dig;
+    private final Place fill;
+    private final Place tip;
+    private final ForceBuffer forces;
+    private double tool;
+
+    CaseSolver(Front front, LoadCase load) {
+        this.load = load;
+        solver = new FrontSolver(front);
+        forces = new ForceBuffer(front.mechanism());
+        int duty = load.kind() == LoadCase.Kind.CURL
+                ? front.curl()
+                : load.kind() == LoadCase.Kind.CROWD ? front.crowd() : -1;
+        dig = duty < 0 ? null : new DigSolver(solver, front.tip(), duty, false);
+        boolean tools = front.linkage().tool().isPresent();
+        fill = tools ? front.fill() : null;
+        tip = tools ? front.tip() : null;
+    }
+
+    /**
+     * Finds the forces of the case at a pose.
+     *
+     * @param fractions fraction of stroke of each cylinder; not modified
+     * @return false where the pose does not assemble or nothing limits the tool force
+     */
+    boolean solve(double[] fractions) {
+        if (solver.place(fractions) != PoseSolver.ASSEMBLED) {
+            return false;
+        }
+        if (dig != null) {
+            tool = dig.force();
+            return tool < DigBest.UNLIMITED;
+        }
+        solver.loadWeights(solver.front().masses());
+        if (load.payload() != 0) {
+            solver.loadAt(fill, 0, -load.payload() * Linkage.GRAVITY);
+        }
+        if (load.forceX() != 0 || load.forceY() != 0) {
+            solver.loadAt(tip, load.forceX(), load.forceY());
+        }
+        solver.solve(forces);
+        return true;
+    }
+
+    /** Total force of a cylinder at the pose solved last, + push; in N. */
+    double cylinder(int cylinder) {
+        return dig == null ? forces.cylinder(cylinder) : dig.cylinder(cylinder, tool);
+    }
+
+    /** Force of the pin on the link at the pose solved last, x in machine axes; in N. */
+    double bearingX(int bearing) {
+        return dig == null
+                ? forces.bearingX(bearing)
+                : dig.fixed().bearingX(bearing) + tool * dig.unit().bearingX(bearing);
+    }
+
+    /** Force of the pin on the link at the pose solved last, y in machine axes; in N. */
+    double bearingY(int bearing) {
+        return dig == null
+                ? forces.bearingY(bearing)
+                : dig.fixed().bearingY(bearing) + tool * dig.unit().bearingY(bearing);
+    }
+
+    /** The pose solved last. */
+    PoseBuffer pose() {
+        return solver.pose();
+    }
+}
