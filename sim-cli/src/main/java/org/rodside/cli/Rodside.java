@@ -19,7 +19,13 @@ import picocli.CommandLine.Spec;
         versionProvider = Version.class,
         mixinStandardHelpOptions = true,
         synopsisSubcommandLabel = "COMMAND",
-        subcommands = {PoseCommand.class, DigCommand.class, LoadsCommand.class, CyclesCommand.class, StudyCommand.class
+        subcommands = {
+            PoseCommand.class,
+            DigCommand.class,
+            LoadsCommand.class,
+            SizeCommand.class,
+            CyclesCommand.class,
+            StudyCommand.class
         },
         footer = {
             "",

@@ -7,7 +7,6 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
-import org.rodside.io.CsvWriter;
 import org.rodside.kinematics.Mechanism;
 import org.rodside.model.Cylinder;
 import org.rodside.study.Front;
@@ -280,20 +279,8 @@ public final class LoadsReport {
 
     /** Writes {@code loads.csv} and {@code bearings.csv}. */
     public void files(Path folder) {
-        write(folder.resolve("loads.csv"), cylinderTable());
-        write(folder.resolve("bearings.csv"), bearingTable());
-    }
-
-    private void write(Path path, Table table) {
-        CsvWriter.write(path, table.columns(), units, sink -> {
-            for (int row = 0; row < table.rows(); row++) {
-                double[] values = new double[table.columns().size()];
-                for (int column = 0; column < values.length; column++) {
-                    values[column] = table.at(row, column);
-                }
-                sink.row(values);
-            }
-        });
+        TableFile.write(folder.resolve("loads.csv"), cylinderTable(), units);
+        TableFile.write(folder.resolve("bearings.csv"), bearingTable(), units);
     }
 
     /** The section of the report page. */

@@ -1,6 +1,7 @@
 package org.rodside.io;
 
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.regex.Pattern;
 import org.rodside.model.InputException;
 import org.rodside.units.Unit;
@@ -59,11 +60,33 @@ public final class LoadText {
         return Integer.parseInt(digits);
     }
 
+    /** A number above zero, told in a unit; in SI, empty where the option is not given. */
+    public static OptionalDouble above(String option, Optional<String> text, Unit unit) {
+        if (text.isEmpty()) {
+            return OptionalDouble.empty();
+        }
+        double value = number(option, text.get(), unit.symbol());
+        if (!(value > 0)) {
+            throw new InputException(option + ": must be above 0, found " + text.get());
+        }
+        return OptionalDouble.of(unit.toSi(value));
+    }
+
+    /** A number not below zero, told in a unit; in SI. */
+    public static double notBelow(String option, String text, Unit unit) {
+        double value = number(option, text, unit.symbol());
+        if (!(value >= 0)) {
+            throw new InputException(option + ": must not be below 0, found " + text);
+        }
+        return unit.toSi(value);
+    }
+
     /** A plain number. */
     public static double number(String option, String text, String unit) {
         String trimmed = text.strip();
         if (!NUMBER.matcher(trimmed).matches() || !(Math.abs(Double.parseDouble(trimmed)) <= ABSURD)) {
-            throw new InputException(option + ": a number in " + unit + " is wanted, found '" + text + "'");
+            throw new InputException(
+                    option + ": a number" + (unit.isEmpty() ? "" : " in " + unit) + " is wanted, found '" + text + "'");
         }
         return Double.parseDouble(trimmed);
     }

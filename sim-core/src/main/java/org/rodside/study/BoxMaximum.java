@@ -30,6 +30,9 @@ public final class BoxMaximum {
     /** Hills that are climbed. */
     private static final int CLIMBS = 16;
 
+    /** Tops lower than the highest by more than this share are not followed along their ridges; no unit. */
+    private static final double NEARLY = 0.02;
+
     /** The search ends when its stride falls below this share of a stroke; no unit. */
     private static final double LAST_STRIDE = 1e-9;
 
@@ -82,14 +85,26 @@ public final class BoxMaximum {
      * @param objective the same function
      */
     public Optimum findFrom(double[] values, Objective objective) {
-        Optimum best = new Optimum(Double.NaN, start);
+        List<Optimum> tops = new ArrayList<>();
+        double highest = Double.NEGATIVE_INFINITY;
         for (int cell : hills(values)) {
-            if (best.exists() && values[cell] + 2 * drop(values, cell) <= best.value()) {
-                continue;
+            if (values[cell] + 2 * drop(values, cell) > highest) {
+                Optimum top = climb(objective, new Optimum(values[cell], point(cell)));
+                tops.add(top);
+                highest = Math.max(highest, top.value());
             }
-            Optimum top = climb(objective, new Optimum(values[cell], point(cell)));
-            if (!best.exists() || top.value() > best.value()) {
-                best = top;
+        }
+        return highestRidge(tops, highest, objective);
+    }
+
+    /** Follows the ridges from every top that is nearly the highest. */
+    private Optimum highestRidge(List<Optimum> tops, double highest, Objective objective) {
+        Optimum best = new Optimum(Double.NaN, start);
+        RidgeClimber ridge = new RidgeClimber(objective, free, start.length);
+        for (Optimum top : tops) {
+            if (top.value() >= highest - NEARLY * Math.abs(highest)) {
+                Optimum reached = free.length == 0 ? top : ridge.climb(top);
+                best = !best.exists() || reached.value() > best.value() ? reached : best;
             }
         }
         return best;
@@ -97,7 +112,11 @@ public final class BoxMaximum {
 
     /** Climbs from a given pose only. */
     public Optimum climbFrom(Objective objective, double[] fractions) {
-        return climb(objective, new Optimum(objective.at(fractions), fractions.clone()));
+        Optimum from = new Optimum(objective.at(fractions), fractions.clone());
+        if (free.length == 0 || !from.exists()) {
+            return from;
+        }
+        return new RidgeClimber(objective, free, start.length).climb(climb(objective, from));
     }
 
     /** Number of grid points. */

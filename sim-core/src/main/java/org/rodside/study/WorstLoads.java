@@ -22,6 +22,9 @@ public final class WorstLoads {
     /** Density of what fills the bucket where nothing else is said: moist loam; in kg/m³. */
     public static final double USUAL_DENSITY = 1800;
 
+    /** The usual first grid is this many times finer than for one quantity, for it serves them all; no unit. */
+    private static final int REFINEMENT = 2;
+
     private final Front front;
     private final Mechanism mechanism;
     private final int threads;
@@ -76,7 +79,7 @@ public final class WorstLoads {
 
     /** Searches all cases. */
     public static LoadsAnswer find(Front front, List<LoadCase> cases, int threads, DoubleConsumer progress) {
-        return find(front, cases, threads, 1, progress);
+        return find(front, cases, threads, REFINEMENT, progress);
     }
 
     /** As {@link #find(Front, List, int, DoubleConsumer)} with a grid that many times finer. */
