@@ -49,24 +49,26 @@ public final class SizeReport {
                 Column.of("pull", Quantity.FLOW),
                 Column.words("present", NO_YES),
                 Column.words("carries", NO_YES)));
-        for (SizeRow row : rows) {
-            table.row(new double[] {
-                row.index(),
-                row.cylinder().bore(),
-                row.cylinder().rod(),
-                row.cylinder().count(),
-                row.pushPressure(),
-                row.pullPressure(),
-                finite(row.bucklingFactor()),
-                row.loadedFactor(),
-                row.mass(),
-                row.pushFlow(),
-                row.pullFlow(),
-                row.present() ? 1 : 0,
-                row.carries() ? 1 : 0
-            });
-        }
+        rows.forEach(row -> table.row(values(row)));
         return table;
+    }
+
+    private static double[] values(SizeRow row) {
+        return new double[] {
+            row.index(),
+            row.cylinder().bore(),
+            row.cylinder().rod(),
+            row.cylinder().count(),
+            row.pushPressure(),
+            row.pullPressure(),
+            finite(row.bucklingFactor()),
+            row.loadedFactor(),
+            row.mass(),
+            row.pushFlow(),
+            row.pullFlow(),
+            row.present() ? 1 : 0,
+            row.carries() ? 1 : 0
+        };
     }
 
     private static double finite(double factor) {
