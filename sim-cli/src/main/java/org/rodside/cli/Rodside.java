@@ -22,6 +22,7 @@ import picocli.CommandLine.Spec;
         subcommands = {
             PoseCommand.class,
             DigCommand.class,
+            LiftCommand.class,
             LoadsCommand.class,
             SizeCommand.class,
             CyclesCommand.class,

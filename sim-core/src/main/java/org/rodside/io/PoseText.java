@@ -3,10 +3,12 @@ package org.rodside.io;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import java.util.regex.Pattern;
 import org.rodside.model.Cylinder;
 import org.rodside.model.InputException;
 import org.rodside.model.Linkage;
+import org.rodside.model.Tool;
 
 /** Reads a pose as typed on the command line, {@code boom=0.4,stick=0.5,bucket=0.3}: fractions of stroke. */
 public final class PoseText {
@@ -63,6 +65,44 @@ public final class PoseText {
             pose.read(text);
         }
         return pose.result();
+    }
+
+    /**
+     * Where the cylinders of a lift stand: the curl cylinder at a fraction, those that neither hoist, crowd nor curl at half
+     * stroke or as typed.
+     *
+     * @throws InputException with every fault; naming a cylinder that hoists, crowds or curls is one
+     */
+    public static double[] others(String option, Optional<String> text, Linkage linkage, double curl) {
+        double[] fractions = fractions(option, text.orElse(""), linkage, 0.5);
+        Tool tool = linkage.tool().orElse(null);
+        List<String> wrong = new ArrayList<>();
+        for (int c = 0; c < fractions.length; c++) {
+            String name = linkage.cylinders().get(c).name();
+            boolean duty = tool != null
+                    && (name.equals(tool.curl())
+                            || name.equals(tool.hoist().orElse(""))
+                            || name.equals(tool.crowd().orElse("")));
+            if (duty && text.isPresent() && Pattern.matches(".*(^|,)\\s*" + name + "\\s*=.*", text.get())) {
+                wrong.add(option + ": cylinder " + name + " hoists, crowds or curls here and is not free to be set"
+                        + " (--curl sets the curl cylinder)");
+            }
+            fractions[c] = tool != null && name.equals(tool.curl()) ? curl : fractions[c];
+        }
+        if (!wrong.isEmpty()) {
+            throw new InputException(wrong);
+        }
+        return fractions;
+    }
+
+    /** One fraction of stroke, 0 retracted to 1 extended; no unit. */
+    public static double fraction(String option, String text) {
+        double fraction = NUMBER.matcher(text.strip()).matches() ? Double.parseDouble(text.strip()) : Double.NaN;
+        if (!(fraction >= 0 && fraction <= 1)) {
+            throw new InputException(option
+                    + ": a fraction of stroke from 0 (retracted) to 1 (extended) is wanted, found '" + text + "'");
+        }
+        return fraction;
     }
 
     /** A pose of a linkage as it would be typed, for messages. */

@@ -80,12 +80,7 @@ public final class LimitSolver {
      * @return the largest t; infinite where no limit is met, NaN where the forces are NaN
      */
     public double largest(ForceBuffer fixed, ForceBuffer unit, GroundBuffer fixedGround, GroundBuffer unitGround) {
-        largest = Double.POSITIVE_INFINITY;
-        governing = NONE;
-        for (int c = 0; c < push.length; c++) {
-            meet(2 * c, fixed.cylinder(c), unit.cylinder(c), push[c]);
-            meet(2 * c + 1, -fixed.cylinder(c), -unit.cylinder(c), pull[c]);
-        }
+        largestOnCylinders(fixed, unit);
         if (stability) {
             int next = 2 * push.length;
             meet(next, -fixedGround.momentAbout(front), -unitGround.momentAbout(front), 0);
@@ -96,6 +91,17 @@ public final class LimitSolver {
                 meet(next + 2, fixedGround.horizontal() - fixedGrip, unitGround.horizontal() - unitGrip, 0);
                 meet(next + 2, -fixedGround.horizontal() - fixedGrip, -unitGround.horizontal() - unitGrip, 0);
             }
+        }
+        return largest;
+    }
+
+    /** As {@link #largest}, cylinders alone: tipping and slip left out. */
+    public double largestOnCylinders(ForceBuffer fixed, ForceBuffer unit) {
+        largest = Double.POSITIVE_INFINITY;
+        governing = NONE;
+        for (int c = 0; c < push.length; c++) {
+            meet(2 * c, fixed.cylinder(c), unit.cylinder(c), push[c]);
+            meet(2 * c + 1, -fixed.cylinder(c), -unit.cylinder(c), pull[c]);
         }
         return largest;
     }
