@@ -35,17 +35,11 @@ import org.rodside.study.PoseStudy;
  */
 class BookDynamicsTest {
 
-    /** Printed decimals of θ₃, θ₄ (degrees), ω₃, ω₄ (rad/s), α₄ (rad/s²): half of the last of two. */
+    /** Half of the last of two printed decimals; in degrees, rad/s, rad/s², lb and lb·in. */
     private static final double TWO_DECIMALS = 0.005;
 
     /** Half of the last digit of α₃ = 120.9 rad/s². */
     private static final double ONE_DECIMAL = 0.05;
-
-    /** The book carries its accelerations rounded into the forces: two of the last digit; in lb. */
-    private static final double BOOK_FORCE = 0.02;
-
-    /** The same times arms of some 5 in; in lb·in. */
-    private static final double BOOK_TORQUE = 0.1;
 
     private static final double OMEGA = 25;
     private static final double ALPHA = -40;
@@ -142,10 +136,10 @@ class BookDynamicsTest {
         pounds(77.71 + weightOnRocker, forces.y("O4", "rocker"), "F14 y");
         int pin = mechanism.pin("Q");
         double torque = pose.pinX(pin) * forces.y("Q", "crank") - pose.pinY(pin) * forces.x("Q", "crank");
-        assertEquals(243.23, INCH.fromSi(POUND_FORCE.fromSi(torque)), BOOK_TORQUE, "T12");
+        assertEquals(243.23, INCH.fromSi(POUND_FORCE.fromSi(torque)), TWO_DECIMALS, "T12");
     }
 
     private static void pounds(double printed, double force, String what) {
-        assertEquals(printed, POUND_FORCE.fromSi(force), BOOK_FORCE, what);
+        assertEquals(printed, POUND_FORCE.fromSi(force), TWO_DECIMALS, what);
     }
 }
