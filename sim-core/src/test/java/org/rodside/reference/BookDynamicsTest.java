@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.rodside.units.Unit.INCH;
 import static org.rodside.units.Unit.POUND_FORCE;
 
+import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -41,6 +42,9 @@ class BookDynamicsTest {
     /** Half of the last digit of α₃ = 120.9 rad/s². */
     private static final double ONE_DECIMAL = 0.05;
 
+    /** Time between poses whose differences are taken: cuts off less than a rounded digit; in s. */
+    private static final double INSTANT = 3e-5;
+
     private static final double OMEGA = 25;
     private static final double ALPHA = -40;
     private static final double TOOL = POUND_FORCE.toSi(80);
@@ -61,19 +65,26 @@ class BookDynamicsTest {
         return dense ? new DenseForceSolver(mechanism) : new StagedForceSolver(mechanism);
     }
 
-    /** Drives the stroke so that the crank turns as the book says: its motion is linear in the stroke's. */
-    private void move(PoseSolver solver) {
+    /**
+     * Drives the stroke so that the crank turns as the book says: its motion is linear in the stroke's.
+     *
+     * @return rate and acceleration of the stroke; in m/s and m/s²
+     */
+    private double[] move(PoseSolver solver) {
         int crank = mechanism.body("crank");
         assertEquals(PoseSolver.ASSEMBLED, solver.solve(example.strokes(example.drawn()), pose));
         solver.rates(pose, new double[] {1}, motion);
-        solver.rates(pose, new double[] {OMEGA / motion.omega(crank)}, motion);
+        double rate = OMEGA / motion.omega(crank);
+        solver.rates(pose, new double[] {rate}, motion);
         solver.accelerations(pose, new double[] {0}, motion);
         double without = motion.alpha(crank);
         solver.accelerations(pose, new double[] {1}, motion);
         double each = motion.alpha(crank) - without;
-        solver.accelerations(pose, new double[] {(ALPHA - without) / each}, motion);
+        double acceleration = (ALPHA - without) / each;
+        solver.accelerations(pose, new double[] {acceleration}, motion);
         assertEquals(OMEGA, motion.omega(crank), 1e-9);
         assertEquals(ALPHA, motion.alpha(crank), 1e-9);
+        return new double[] {rate, acceleration};
     }
 
     @ParameterizedTest
@@ -89,6 +100,34 @@ class BookDynamicsTest {
         assertEquals(7.93, motion.omega(rocker), TWO_DECIMALS);
         assertEquals(120.9, motion.alpha(coupler), ONE_DECIMAL);
         assertEquals(276.29, motion.alpha(rocker), TWO_DECIMALS);
+    }
+
+    /** The same motion by differences of poses along the stroke's path: the stroke's own acceleration is right too. */
+    @ParameterizedTest
+    @ValueSource(booleans = {false, true})
+    void motionByDifferences(boolean dense) {
+        PoseSolver solver = poses(dense);
+        double[] drive = move(solver);
+        double[] before = turns(solver, drive, -INSTANT);
+        double[] now = turns(solver, drive, 0);
+        double[] after = turns(solver, drive, INSTANT);
+        double[] omega = {OMEGA, -5.87, 7.93};
+        double[] alpha = {ALPHA, 120.9, 276.29};
+        for (int i = 0; i < omega.length; i++) {
+            assertEquals(omega[i], (after[i] - before[i]) / (2 * INSTANT), TWO_DECIMALS);
+            assertEquals(alpha[i], (after[i] - 2 * now[i] + before[i]) / (INSTANT * INSTANT), TWO_DECIMALS);
+        }
+    }
+
+    /** Turns of crank, coupler and rocker at a time from the book's pose; in rad and s. */
+    private double[] turns(PoseSolver solver, double[] drive, double time) {
+        double[] strokes = example.strokes(example.drawn());
+        strokes[0] += drive[0] * time + drive[1] * time * time / 2;
+        PoseBuffer there = new PoseBuffer(mechanism);
+        assertEquals(PoseSolver.ASSEMBLED, solver.solve(strokes, there));
+        return Stream.of("crank", "coupler", "rocker")
+                .mapToDouble(link -> there.turn(mechanism.body(link)))
+                .toArray();
     }
 
     @ParameterizedTest
