@@ -7,8 +7,9 @@ import java.util.List;
 import java.util.SplittableRandom;
 
 /**
- * Largest value of a function of the stroke fractions over the whole stroke box: a grid finds the hills, a pattern search
- * climbs each of the highest to its continuous top. The function may have kinks (it often is the least of several
+ * Largest value of a function of the stroke fractions over the whole stroke box: a grid finds the hills, each of the highest
+ * is climbed along its ridges, cells that could hide a higher peak are looked into, and a pattern search finds the last
+ * digits. The function may have kinks (it often is the least of several
  * limits) and may have no value (NaN) at some poses. The same call always gives the same bits.
  */
 public final class BoxMaximum {
@@ -30,8 +31,8 @@ public final class BoxMaximum {
     /** Hills that are climbed. */
     private static final int CLIMBS = 16;
 
-    /** Tops lower than the highest by more than this share are not followed along their ridges; no unit. */
-    private static final double NEARLY = 0.02;
+    /** Grid values that differ by less than this share are the same height: rounding; no unit. */
+    private static final double SAME = 1e-9;
 
     /** The search ends when its stride falls below this share of a stroke; no unit. */
     private static final double LAST_STRIDE = 1e-9;
@@ -85,29 +86,19 @@ public final class BoxMaximum {
      * @param objective the same function
      */
     public Optimum findFrom(double[] values, Objective objective) {
-        List<Optimum> tops = new ArrayList<>();
-        double highest = Double.NEGATIVE_INFINITY;
-        for (int cell : hills(values)) {
-            if (values[cell] + 2 * drop(values, cell) > highest) {
-                Optimum top = climb(objective, new Optimum(values[cell], point(cell)));
-                tops.add(top);
-                highest = Math.max(highest, top.value());
-            }
-        }
-        return highestRidge(tops, highest, objective);
-    }
-
-    /** Follows the ridges from every top that is nearly the highest. */
-    private Optimum highestRidge(List<Optimum> tops, double highest, Objective objective) {
         Optimum best = new Optimum(Double.NaN, start);
-        RidgeClimber ridge = new RidgeClimber(objective, free, start.length);
-        for (Optimum top : tops) {
-            if (top.value() >= highest - NEARLY * Math.abs(highest)) {
-                Optimum reached = free.length == 0 ? top : ridge.climb(top);
-                best = !best.exists() || reached.value() > best.value() ? reached : best;
+        RidgeClimber ridge = new RidgeClimber(objective, free);
+        for (int cell : hills(values)) {
+            if (!best.exists() || values[cell] + 2 * drop(values, cell) > best.value()) {
+                Optimum top = new Optimum(values[cell], point(cell));
+                top = free.length == 0 ? top : ridge.climb(top);
+                best = !best.exists() || top.value() > best.value() ? top : best;
             }
         }
-        return best;
+        if (free.length == 0 || !best.exists()) {
+            return best;
+        }
+        return climb(objective, ridge.top(new CellSearch(objective, free).open(best, values, grid)));
     }
 
     /** Climbs from a given pose only. */
@@ -116,7 +107,7 @@ public final class BoxMaximum {
         if (free.length == 0 || !from.exists()) {
             return from;
         }
-        return new RidgeClimber(objective, free, start.length).climb(climb(objective, from));
+        return climb(objective, new RidgeClimber(objective, free).top(from));
     }
 
     /** Number of grid points. */
@@ -169,7 +160,23 @@ public final class BoxMaximum {
         double bar = highest;
         hills.removeIf(cell -> values[cell] + 2 * drop(values, cell) < bar);
         hills.sort(Comparator.comparingDouble((Integer cell) -> -values[cell]));
-        return hills.subList(0, Math.min(CLIMBS, hills.size()));
+        return different(hills, values);
+    }
+
+    /** The first hills, at most two of the very same height: more of them are one plateau. */
+    private static List<Integer> different(List<Integer> hills, double[] values) {
+        List<Integer> few = new ArrayList<>();
+        for (int cell : hills) {
+            int last = few.size() - 2;
+            double size = Math.abs(values[cell]);
+            if (last < 0 || !(Math.abs(values[few.get(last)] - values[cell]) <= SAME * size)) {
+                few.add(cell);
+            }
+            if (few.size() == CLIMBS) {
+                break;
+            }
+        }
+        return few;
     }
 
     /** How far the lowest neighbour along an axis lies below a grid point; negative where one lies above. */

@@ -1,7 +1,10 @@
 package org.rodside.study;
 
+import java.util.List;
+import org.rodside.hydraulics.Column;
 import org.rodside.kinematics.PoseBuffer;
 import org.rodside.kinematics.PoseSolver;
+import org.rodside.model.Cylinder;
 import org.rodside.model.Linkage;
 import org.rodside.statics.ForceBuffer;
 
@@ -14,6 +17,10 @@ final class CaseSolver {
     private final Place fill;
     private final Place tip;
     private final ForceBuffer forces;
+    private final Column[] columns;
+    private final double[] shares;
+    private final double[] length;
+    private final double[] critical;
     private double tool;
 
     CaseSolver(Front front, LoadCase load) {
@@ -24,6 +31,11 @@ final class CaseSolver {
                 ? front.curl()
                 : load.kind() == LoadCase.Kind.CROWD ? front.crowd() : -1;
         dig = duty < 0 ? null : new DigSolver(solver, front.tip(), duty, false);
+        List<Cylinder> cylinders = front.linkage().cylinders();
+        columns = cylinders.stream().map(Column::of).toArray(Column[]::new);
+        shares = cylinders.stream().mapToDouble(Cylinder::harderShare).toArray();
+        length = new double[columns.length];
+        critical = new double[columns.length];
         boolean tools = front.linkage().tool().isPresent();
         fill = tools ? front.fill() : null;
         tip = tools ? front.tip() : null;
@@ -57,6 +69,19 @@ final class CaseSolver {
     /** Total force of a cylinder at the pose solved last, + push; in N. */
     double cylinder(int cylinder) {
         return dig == null ? forces.cylinder(cylinder) : dig.cylinder(cylinder, tool);
+    }
+
+    /**
+     * Push of the harder-worked twin over the critical load of its column at the pose solved last: one over the buckling
+     * factor, below zero for a pull; no unit. The critical load is kept until the cylinder's length changes.
+     */
+    double columnWork(int cylinder) {
+        double now = solver.pose().length(cylinder);
+        if (now != length[cylinder]) {
+            length[cylinder] = now;
+            critical[cylinder] = columns[cylinder].critical(now);
+        }
+        return shares[cylinder] * cylinder(cylinder) / critical[cylinder];
     }
 
     /** Force of the pin on the link at the pose solved last, x in machine axes; in N. */

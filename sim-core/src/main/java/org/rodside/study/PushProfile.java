@@ -72,13 +72,14 @@ final class PushProfile {
             return new Worst(Double.POSITIVE_INFINITY, 0, Double.NaN, Double.NaN);
         }
         Optimum top = search.climbFrom(
-                at -> solver.solve(at) && solver.cylinder(c) > 0
-                        ? -column.factor(solver.pose().length(c), solver.cylinder(c))
+                at -> solver.solve(at)
+                        ? solver.cylinder(c) / column.critical(solver.pose().length(c))
                         : Double.NaN,
                 search.point(cell[c][best]));
         solver.solve(top.at());
         PoseBuffer pose = solver.pose();
         double inclination = Math.atan2(Math.abs(pose.unitY(c)), Math.abs(pose.unitX(c)));
-        return new Worst(-top.value(), solver.cylinder(c), pose.length(c), inclination);
+        double force = solver.cylinder(c);
+        return new Worst(column.factor(pose.length(c), force), force, pose.length(c), inclination);
     }
 }

@@ -1,187 +1,195 @@
 package org.rodside.study;
 
+import java.util.ArrayList;
+import java.util.List;
 import java.util.SplittableRandom;
+import org.apache.commons.math3.exception.MathIllegalStateException;
+import org.apache.commons.math3.optim.MaxIter;
+import org.apache.commons.math3.optim.linear.LinearConstraint;
+import org.apache.commons.math3.optim.linear.LinearConstraintSet;
+import org.apache.commons.math3.optim.linear.LinearObjectiveFunction;
+import org.apache.commons.math3.optim.linear.NonNegativeConstraint;
+import org.apache.commons.math3.optim.linear.Relationship;
+import org.apache.commons.math3.optim.linear.SimplexSolver;
+import org.apache.commons.math3.optim.nonlinear.scalar.GoalType;
 
 /**
- * Climbs a function with kinks to its top inside the stroke box by gradient sampling (Burke, Lewis and Overton, SIAM J.
- * Optim. 15, 2005; recalled): gradients at a few places around the point, the shortest vector in their convex hull is the way
- * up, along a ridge where the function has one; when no step along it helps, the places move closer. Gradients are forward
- * differences. Owns its scratch; the same call always gives the same bits; not thread-safe.
+ * Climbs along ridges (theory W1). Under a tool force every load is the least of several smooth pieces, one a limit; its
+ * peaks sit on sharp ridges that slant through the stroke box, where a search along fixed directions stops. Here the slope
+ * is taken at several places about the present one, so that every piece near it is met; the highest point under all those
+ * tangent planes within a small box is a linear programme, and its answer is the next trial (cutting planes, Kelley 1960,
+ * with a trust region; recalled). The box shrinks where the trial is no higher. Never leaves the stroke box, never ends
+ * lower than it started; the same call gives the same bits. Not thread-safe.
  */
 final class RidgeClimber {
 
-    /** First and last distance of the sampled places; share of a stroke. */
-    private static final double FIRST_RADIUS = 1e-2;
+    /** First and last half-width of the small box; share of a stroke. */
+    private static final double FIRST = 0.02;
 
-    private static final double LAST_RADIUS = 1e-8;
+    private static final double LAST = 1e-7;
 
-    /** Step of the forward differences as a share of the radius: well inside it, well above rounding. */
-    private static final double DIFFERENCE = 1e-2;
+    /** Widest that the small box may grow; share of a stroke. */
+    private static final double WIDEST = 0.1;
 
-    /** Steps taken at one radius at most; a ridge longer than that goes on at the next. */
-    private static final int STEPS = 24;
+    /** Step of a slope over the half-width of the small box: seldom astride a kink, far above rounding; no unit. */
+    private static final double SLOPE_STEP = 1e-3;
 
-    /** Rounds of the search for the shortest vector. */
-    private static final int ROUNDS = 60;
+    /** Steps of one climb from a hill, and of one that is to reach the top. */
+    private static final int FEW_STEPS = 24;
 
-    /** A step counts when it gains more than this share: less is rounding. */
-    private static final double GAIN = 1e-13;
+    private static final int MANY_STEPS = 80;
+
+    /** Climbs to the top start anew while they gain more than this share: the small box has to grow again; no unit. */
+    private static final double GAIN = 1e-7;
+
+    private static final int MOST_RESTARTS = 12;
+
+    /** Trials that were no higher and whose own planes are added before the box shrinks. */
+    private static final int CUTS = 4;
+
+    private static final int MOST_PIVOTS = 200;
+    private static final int SEED = 20260102;
 
     private final BoxMaximum.Objective objective;
     private final int[] free;
-    private final int samples;
-    private final double[][] gradients;
-    private final double[] here;
-    private final double[] trial;
-    private final double[] way;
+    private final int n;
+    private SplittableRandom random;
+    private double[] here;
     private double value;
+    private double width;
+    private double base;
 
-    RidgeClimber(BoxMaximum.Objective objective, int[] free, int axes) {
+    /**
+     * @param objective what is to be made largest
+     * @param free axes along which it may move, at least one; not modified
+     */
+    RidgeClimber(BoxMaximum.Objective objective, int[] free) {
         this.objective = objective;
         this.free = free;
-        samples = 2 * free.length + 1;
-        gradients = new double[samples][free.length];
-        here = new double[axes];
-        trial = new double[axes];
-        way = new double[free.length];
+        n = free.length;
     }
 
+    /** Climbs from a pose that has a value until nothing more is gained. */
+    Optimum top(Optimum from) {
+        Optimum best = from;
+        for (int i = 0; i < MOST_RESTARTS; i++) {
+            Optimum next = climb(best, MANY_STEPS);
+            boolean still = next.value() > best.value() + GAIN * Math.abs(best.value());
+            best = next;
+            if (!still) {
+                break;
+            }
+        }
+        return best;
+    }
+
+    /** Climbs some way from a pose that has a value. */
     Optimum climb(Optimum from) {
-        System.arraycopy(from.at(), 0, here, 0, here.length);
+        return climb(from, FEW_STEPS);
+    }
+
+    private Optimum climb(Optimum from, int steps) {
+        here = from.at().clone();
         value = from.value();
-        SplittableRandom random = new SplittableRandom(1);
-        for (double radius = FIRST_RADIUS; radius > LAST_RADIUS; radius /= 10) {
-            int taken = 0;
-            while (taken < STEPS && step(radius, random)) {
-                taken++;
-            }
+        width = FIRST;
+        random = new SplittableRandom(SEED);
+        for (int i = 0; i < steps && width > LAST; i++) {
+            step();
         }
-        return new Optimum(value, here.clone());
+        return new Optimum(value, here);
     }
 
-    private boolean step(double radius, SplittableRandom random) {
-        int found = 0;
-        for (int sample = 0; sample < samples; sample++) {
-            for (int axis = 0; axis < here.length; axis++) {
-                trial[axis] = here[axis];
-            }
+    private void step() {
+        double before = value;
+        base = before;
+        List<LinearConstraint> planes = new ArrayList<>();
+        double[] centre = here;
+        addPlane(centre, centre, before, planes);
+        for (int i = 0; i < 2 * n; i++) {
+            double[] near = centre.clone();
             for (int axis : free) {
-                double off = sample == 0 ? 0 : radius * random.nextDouble(-1, 1);
-                trial[axis] = inside(here[axis] + off);
+                near[axis] = clamp(centre[axis] + width * random.nextDouble(-1, 1));
             }
-            found += gradient(radius * DIFFERENCE, gradients[found]) ? 1 : 0;
+            double reached = objective.at(near);
+            addPlane(centre, near, reached, planes);
+            take(near, reached);
         }
-        if (found == 0) {
-            return false;
+        boolean planned = false;
+        for (int i = 0; i < CUTS && !planned; i++) {
+            double[] trial = highest(centre, planes);
+            double top = trial == null ? Double.NaN : objective.at(trial);
+            planned = top > value;
+            if (planned) {
+                take(trial, top);
+            } else if (trial == null || Double.isNaN(top)) {
+                break;
+            } else {
+                addPlane(centre, trial, top, planes);
+            }
         }
-        holdBounds(found);
-        shortest(found);
-        return walk(radius);
+        width = planned ? Math.min(WIDEST, 2 * width) : value > before ? width * 0.7 : width / 3;
     }
 
-    private static double inside(double fraction) {
+    private void take(double[] at, double reached) {
+        if (reached > value) {
+            value = reached;
+            here = at;
+        }
+    }
+
+    private static double clamp(double fraction) {
         return Math.max(0, Math.min(1, fraction));
     }
 
-    /** Gradient at the trial point, differenced towards the inside of the box; false where there is no value. */
-    private boolean gradient(double by, double[] out) {
-        double base = objective.at(trial);
-        for (int i = 0; i < free.length; i++) {
-            int axis = free[i];
-            double kept = trial[axis];
-            double step = kept + by > 1 ? -by : by;
-            trial[axis] = kept + step;
-            out[i] = (objective.at(trial) - base) / step;
-            trial[axis] = kept;
-            if (!(Math.abs(out[i]) < Double.POSITIVE_INFINITY)) {
-                return false;
-            }
+    /** The plane t ≤ f + g·(x − near), x counted from the lower corner of the small box round the centre. */
+    private void addPlane(double[] centre, double[] near, double f, List<LinearConstraint> planes) {
+        double[] row = new double[n + 1];
+        double right = f;
+        double step = width * SLOPE_STEP;
+        for (int a = 0; a < n; a++) {
+            int axis = free[a];
+            double[] beside = near.clone();
+            beside[axis] = near[axis] + step > 1 ? near[axis] - step : near[axis] + step;
+            double slope = (objective.at(beside) - f) / (beside[axis] - near[axis]);
+            row[a] = -slope;
+            right += slope * (low(centre, axis) - near[axis]);
         }
-        return true;
-    }
-
-    /** Leaves out the directions in which every sampled gradient leads out of the box. */
-    private void holdBounds(int found) {
-        for (int i = 0; i < free.length; i++) {
-            double at = here[free[i]];
-            boolean out = at == 0 || at == 1;
-            for (int s = 0; s < found && out; s++) {
-                out = at == 0 ? gradients[s][i] <= 0 : gradients[s][i] >= 0;
-            }
-            for (int s = 0; s < found && out; s++) {
-                gradients[s][i] = 0;
-            }
+        row[n] = 1;
+        if (Math.abs(right) < Double.POSITIVE_INFINITY) {
+            planes.add(new LinearConstraint(row, Relationship.LEQ, right - base));
         }
     }
 
-    /** Shortest vector in the convex hull of the gradients, by walking towards the corner that shortens most. */
-    private void shortest(int found) {
-        System.arraycopy(gradients[0], 0, way, 0, way.length);
-        for (int round = 0; round < ROUNDS; round++) {
-            int corner = 0;
-            double least = Double.POSITIVE_INFINITY;
-            for (int s = 0; s < found; s++) {
-                double along = dot(way, gradients[s]);
-                if (along < least) {
-                    least = along;
-                    corner = s;
-                }
-            }
-            double square = dot(way, way);
-            double gap = 0;
-            for (int i = 0; i < way.length; i++) {
-                double d = gradients[corner][i] - way[i];
-                gap += d * d;
-            }
-            double share = gap > 0 ? Math.min(1, (square - least) / gap) : 0;
-            if (!(share > 1e-12)) {
-                return;
-            }
-            for (int i = 0; i < way.length; i++) {
-                way[i] += share * (gradients[corner][i] - way[i]);
-            }
-        }
+    private double low(double[] centre, int axis) {
+        return clamp(centre[axis] - width);
     }
 
-    private static double dot(double[] a, double[] b) {
-        double sum = 0;
-        for (int i = 0; i < a.length; i++) {
-            sum += a[i] * b[i];
+    /** Highest point under all planes within the small box; null where there is none. */
+    private double[] highest(double[] centre, List<LinearConstraint> planes) {
+        double[] goal = new double[n + 1];
+        goal[n] = 1;
+        List<LinearConstraint> all = new ArrayList<>(planes);
+        for (int a = 0; a < n; a++) {
+            double[] row = new double[n + 1];
+            row[a] = 1;
+            all.add(new LinearConstraint(row, Relationship.LEQ, clamp(centre[free[a]] + width) - low(centre, free[a])));
         }
-        return sum;
-    }
-
-    /** Goes along the way as far as it rises; false where it does not. */
-    private boolean walk(double radius) {
-        double size = Math.sqrt(dot(way, way));
-        if (!(size > 0)) {
-            return false;
-        }
-        double reached = Double.NaN;
-        double length = 0.1 * radius;
-        double best = value + GAIN * Math.abs(value);
-        for (double stride = length; stride <= 1; stride *= 2) {
-            put(stride / size);
-            double there = objective.at(trial);
-            if (!(there > best)) {
-                break;
+        try {
+            double[] found = new SimplexSolver()
+                    .optimize(
+                            new MaxIter(MOST_PIVOTS),
+                            new LinearObjectiveFunction(goal, 0),
+                            new LinearConstraintSet(all),
+                            GoalType.MAXIMIZE,
+                            new NonNegativeConstraint(true))
+                    .getPoint();
+            double[] trial = centre.clone();
+            for (int a = 0; a < n; a++) {
+                trial[free[a]] = clamp(low(centre, free[a]) + found[a]);
             }
-            best = there;
-            reached = stride;
-        }
-        if (Double.isNaN(reached)) {
-            return false;
-        }
-        put(reached / size);
-        System.arraycopy(trial, 0, here, 0, here.length);
-        value = best;
-        return true;
-    }
-
-    private void put(double times) {
-        System.arraycopy(here, 0, trial, 0, here.length);
-        for (int i = 0; i < free.length; i++) {
-            trial[free[i]] = inside(here[free[i]] + times * way[i]);
+            return trial;
+        } catch (MathIllegalStateException e) {
+            return null;
         }
     }
 }

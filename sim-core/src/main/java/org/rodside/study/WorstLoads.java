@@ -128,8 +128,13 @@ public final class WorstLoads {
         return 3 * mechanism.cylinders() + mechanism.bearings();
     }
 
-    /** A quantity at the pose a solver stands at; larger is worse; NaN where it does not occur. */
+    /** A quantity at the pose a solver stands at; larger is worse; one that stays below zero does not occur; NaN where it is not finite. */
     private double quantity(CaseSolver solver, int quantity) {
+        double value = anyQuantity(solver, quantity);
+        return Math.abs(value) < Double.POSITIVE_INFINITY ? value : Double.NaN;
+    }
+
+    private double anyQuantity(CaseSolver solver, int quantity) {
         int cylinders = mechanism.cylinders();
         if (quantity >= 3 * cylinders) {
             int bearing = quantity - 3 * cylinders;
@@ -140,9 +145,9 @@ public final class WorstLoads {
         int c = quantity / 3;
         double force = solver.cylinder(c);
         return switch (quantity % 3) {
-            case 0 -> force > 0 ? force : Double.NaN;
-            case 1 -> force < 0 ? -force : Double.NaN;
-            default -> force > 0 ? -columns.get(c).factor(solver.pose().length(c), force) : Double.NaN;
+            case 0 -> force;
+            case 1 -> -force;
+            default -> solver.columnWork(c);
         };
     }
 
@@ -197,7 +202,7 @@ public final class WorstLoads {
         @Override
         public void accept(Optimum top) {
             int q = quantity++;
-            if (!top.exists() || !solver.solve(top.at())) {
+            if (!(top.value() > 0) || !solver.solve(top.at())) {
                 return;
             }
             if (q < 3 * mechanism.cylinders()) {

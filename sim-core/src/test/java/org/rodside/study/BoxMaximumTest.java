@@ -1,0 +1,77 @@
+package org.rodside.study;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.SplittableRandom;
+import org.junit.jupiter.api.RepeatedTest;
+import org.junit.jupiter.api.RepetitionInfo;
+import org.junit.jupiter.api.Test;
+
+/** The search for a largest value, on functions whose peak is known. */
+class BoxMaximumTest {
+
+    /** Peaks are known exactly; the climb ends when a restart gains less than 1e-7 of a value of about 100. */
+    private static final double PEAK_ABS = 1e-5;
+
+    /** The least of several planes and bowls that all meet at a random place: the sharpest ridges there are. */
+    @RepeatedTest(20)
+    void slantingRidges(RepetitionInfo repetition) {
+        int seed = repetition.getCurrentRepetition();
+        SplittableRandom random = new SplittableRandom(seed);
+        double[] top = random.doubles(3, 0.1, 0.9).toArray();
+        double[][] slope = new double[5][3];
+        for (int a = 0; a < 3; a++) {
+            for (int i = 0; i < 4; i++) {
+                slope[i][a] = random.nextDouble(-20, 20);
+                slope[4][a] -= slope[i][a];
+            }
+        }
+        Optimum found = BoxMaximum.overAll(3).find(at -> {
+            double least = 100;
+            for (double[] g : slope) {
+                double bent = 0;
+                double piece = 100;
+                for (int a = 0; a < 3; a++) {
+                    piece += g[a] * (at[a] - top[a]);
+                    bent += (at[a] - top[a]) * (at[a] - top[a]);
+                }
+                least = Math.min(least, piece - 3 * bent);
+            }
+            return least;
+        });
+        // the slopes add up to nothing, so no step can raise all of them: the value at the meeting place is the largest
+        assertEquals(100, found.value(), PEAK_ABS, "seed " + seed);
+    }
+
+    /** A sharp tent, half a grid cell wide at its foot, on a broad hill elsewhere that the grid sees as highest. */
+    @Test
+    void narrowPeakBesideABroadHill() {
+        double cell = 1.0 / 20;
+        double[] tent = {10.5 * cell, 4.4 * cell, 15.6 * cell};
+        Optimum found = BoxMaximum.overAll(3).find(at -> {
+            double broad = 1;
+            double far = 0;
+            for (int a = 0; a < 3; a++) {
+                broad -= 0.5 * (at[a] - 0.2) * (at[a] - 0.2);
+                far = Math.max(far, Math.abs(at[a] - tent[a]));
+            }
+            return broad + Math.max(0, 2 - 2 * far / (0.75 * cell));
+        });
+        double base = 1;
+        for (double a : tent) {
+            base -= 0.5 * (a - 0.2) * (a - 0.2);
+        }
+        assertEquals(base + 2, found.value(), PEAK_ABS);
+    }
+
+    /** One fixed axis stays where it is, one free axis has its peak at the border; no value on half of the box. */
+    @Test
+    void fixedAxisBorderAndHoles() {
+        Optimum found = new BoxMaximum(new double[] {0.3, Double.NaN, Double.NaN})
+                .find(at -> at[1] < 0.5 ? Double.NaN : at[0] + at[1] - Math.abs(at[2] - 1.0 / 3));
+        assertEquals(1.3, found.value(), PEAK_ABS);
+        assertEquals(0.3, found.at()[0], 0.0);
+        assertTrue(!new BoxMaximum(new double[] {Double.NaN}).find(at -> Double.NaN).exists());
+    }
+}
