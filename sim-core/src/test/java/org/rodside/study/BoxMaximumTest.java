@@ -72,6 +72,8 @@ class BoxMaximumTest {
                 .find(at -> at[1] < 0.5 ? Double.NaN : at[0] + at[1] - Math.abs(at[2] - 1.0 / 3));
         assertEquals(1.3, found.value(), PEAK_ABS);
         assertEquals(0.3, found.at()[0], 0.0);
-        assertTrue(!new BoxMaximum(new double[] {Double.NaN}).find(at -> Double.NaN).exists());
+        assertTrue(!new BoxMaximum(new double[] {Double.NaN})
+                .find(at -> Double.NaN)
+                .exists());
     }
 }
