@@ -21,6 +21,7 @@ import picocli.CommandLine.Spec;
         synopsisSubcommandLabel = "COMMAND",
         subcommands = {
             PoseCommand.class,
+            EnvelopeCommand.class,
             DigCommand.class,
             LiftCommand.class,
             LoadsCommand.class,

@@ -26,7 +26,7 @@ import picocli.CommandLine.Mixin;
 final class StudyCommand implements Callable<Integer> {
 
     private static final List<StudyPart> PARTS =
-            List.of(new DigPart(), new LiftPart(), new LoadsPart(), new SizePart());
+            List.of(new EnvelopePart(), new DigPart(), new LiftPart(), new LoadsPart(), new SizePart());
 
     @Mixin
     private LinkageFile file;

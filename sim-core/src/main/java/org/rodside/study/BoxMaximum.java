@@ -56,6 +56,10 @@ public final class BoxMaximum {
      * @param refinement how many times finer than usual the first grid is
      */
     public BoxMaximum(double[] fixed, int refinement) {
+        this(fixed, (usualGrid(fixed) - 1) * refinement + 1, true);
+    }
+
+    private BoxMaximum(double[] fixed, int gridPoints, boolean counted) {
         List<Integer> moving = new ArrayList<>();
         for (int c = 0; c < fixed.length; c++) {
             if (Double.isNaN(fixed[c])) {
@@ -64,7 +68,17 @@ public final class BoxMaximum {
         }
         free = moving.stream().mapToInt(Integer::intValue).toArray();
         start = fixed.clone();
-        grid = free.length == 0 ? 1 : (GRID[Math.min(free.length, GRID.length) - 1] - 1) * refinement + 1;
+        grid = free.length == 0 ? 1 : gridPoints;
+    }
+
+    private static int usualGrid(double[] fixed) {
+        int free = (int) Arrays.stream(fixed).filter(Double::isNaN).count();
+        return free == 0 ? 1 : GRID[Math.min(free, GRID.length) - 1];
+    }
+
+    /** A search whose first grid has a given number of points an axis. */
+    static BoxMaximum withGrid(double[] fixed, int gridPoints) {
+        return new BoxMaximum(fixed, gridPoints, true);
     }
 
     /** A search over all strokes of a front. */

@@ -95,6 +95,15 @@ public final class Front {
         return place(tool().heel().orElseThrow(() -> needs("tool.heel")));
     }
 
+    /** Fraction of stroke of each cylinder in the drawn pose; no unit. */
+    public double[] drawnFractions() {
+        double[] fractions = new double[mechanism.cylinders()];
+        for (int c = 0; c < fractions.length; c++) {
+            fractions[c] = (mechanism.drawnLength(c) - mechanism.retracted(c)) / mechanism.stroke(c);
+        }
+        return fractions;
+    }
+
     /** The cylinder that curls. */
     public int curl() {
         return mechanism.cylinder(tool().curl());

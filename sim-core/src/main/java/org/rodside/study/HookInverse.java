@@ -93,6 +93,22 @@ final class HookInverse {
         return found;
     }
 
+    /** Whether some pose brings the place to a point (m), machine axes. */
+    boolean reaches(double x, double y) {
+        List<double[]> found = new ArrayList<>();
+        for (int i = 0; i < CELLS; i++) {
+            for (int j = 0; j < CELLS; j++) {
+                if (mayHold(cornerX, x, i, j) && mayHold(cornerY, y, i, j)) {
+                    search(x, y, (i + 0.5) / CELLS, (j + 0.5) / CELLS, found);
+                    if (!found.isEmpty()) {
+                        return true;
+                    }
+                }
+            }
+        }
+        return false;
+    }
+
     private static boolean mayHold(double[][] corner, double wanted, int i, int j) {
         double a = corner[i][j];
         double b = corner[i + 1][j];

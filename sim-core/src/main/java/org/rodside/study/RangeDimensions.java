@@ -1,0 +1,143 @@
+package org.rodside.study;
+
+import java.util.Arrays;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.Optional;
+import org.rodside.kinematics.PoseBuffer;
+import org.rodside.kinematics.PoseSolver;
+import org.rodside.model.Point;
+import org.rodside.model.Tool;
+
+/** Named dimensions of the working range that belong to one pose each (docs/working-range.md; theory R1). */
+final class RangeDimensions {
+
+    /** Below ground counts this many times over while the swing radius is sought: more than any radius can gain by it. */
+    private static final double GROUND_PENALTY = 100;
+
+    /** A pose stands above the ground within; in m. */
+    private static final double ABOVE = 1e-6;
+
+    private final Front front;
+    private final FrontSolver solver;
+    private final PoseBuffer pose;
+    private final Place tip;
+    private final Place hook;
+    private final Optional<Place> heel;
+    private final double[] free;
+    private final Map<String, Double> values = new LinkedHashMap<>();
+    private final Map<String, double[]> poses = new LinkedHashMap<>();
+
+    RangeDimensions(Front front) {
+        this.front = front;
+        solver = new FrontSolver(front);
+        pose = solver.pose();
+        tip = front.tip();
+        hook = front.hook();
+        Tool tool = front.tool();
+        heel = tool.heel().map(front::place);
+        free = new double[front.mechanism().cylinders()];
+        Arrays.fill(free, Double.NaN);
+    }
+
+    Map<String, Double> values() {
+        return values;
+    }
+
+    Map<String, double[]> poses() {
+        return poses;
+    }
+
+    void find() {
+        put("reach", 1, best(() -> tip.x(pose)));
+        put("ground_reach", 1, onLine(() -> tip.y(pose), () -> tip.x(pose), free));
+        put("depth", 1, best(() -> -tip.y(pose)));
+        put("cutting_height", 1, best(() -> tip.y(pose)));
+        put("dump_height", 1, onLine(this::tipBelowHook, () -> tip.y(pose), free));
+        put("dump_height_min", -1, lowestDump());
+        put("level_depth", 1, new Optimum(Double.NaN, free));
+        put("wall_depth", 1, wall());
+        put("swing_radius", -1, swing());
+        put("hook_height", 1, best(() -> hook.y(pose)));
+        put("hook_reach", 1, best(() -> hook.x(pose)));
+    }
+
+    private void put(String name, int sign, Optimum optimum) {
+        values.put(name, sign * optimum.value());
+        if (optimum.exists()) {
+            poses.put(name, optimum.at());
+        }
+    }
+
+    /** A length read off the pose the solver stands at; in m. */
+    @FunctionalInterface
+    private interface Reading {
+        double get();
+    }
+
+    private double read(double[] fractions, Reading reading) {
+        return solver.place(fractions) == PoseSolver.ASSEMBLED ? reading.get() : Double.NaN;
+    }
+
+    private Optimum best(Reading reading) {
+        return new BoxMaximum(free).find(fractions -> read(fractions, reading));
+    }
+
+    private Optimum onLine(Reading miss, Reading value, double[] fixed) {
+        return new EqualitySearch(at -> read(at, miss), at -> read(at, value), fixed).find();
+    }
+
+    /** Zero where the tip stands straight below the hook; NaN where it stands above. */
+    private double tipBelowHook() {
+        return tip.y(pose) < hook.y(pose) ? tip.x(pose) - hook.x(pose) : Double.NaN;
+    }
+
+    private Optimum lowestDump() {
+        if (front.hoist() < 0) {
+            return new Optimum(Double.NaN, free);
+        }
+        double[] hoisted = free.clone();
+        hoisted[front.hoist()] = 1;
+        return onLine(this::tipBelowHook, () -> -tip.y(pose), hoisted);
+    }
+
+    private Optimum wall() {
+        if (heel.isEmpty()) {
+            return new Optimum(Double.NaN, free);
+        }
+        Place back = heel.get();
+        return onLine(
+                () -> back.y(pose) > tip.y(pose) ? back.x(pose) - tip.x(pose) : Double.NaN, () -> -tip.y(pose), free);
+    }
+
+    private Optimum swing() {
+        Optimum best = best(() -> -mostX() - GROUND_PENALTY * Math.max(0, -leastY()));
+        return best.exists() && read(best.at(), this::leastY) >= -ABOVE ? best : new Optimum(Double.NaN, free);
+    }
+
+    private double mostX() {
+        double most = Double.NEGATIVE_INFINITY;
+        for (int pin = 0; pin < front.mechanism().pins(); pin++) {
+            most = Math.max(most, pose.pinX(pin));
+        }
+        for (Point point : toolPoints().values()) {
+            most = Math.max(most, pose.x(tip.body(), point.x(), point.y()));
+        }
+        return most;
+    }
+
+    private double leastY() {
+        double least = Double.POSITIVE_INFINITY;
+        for (int pin = 0; pin < front.mechanism().pins(); pin++) {
+            least = Math.min(least, pose.pinY(pin));
+        }
+        for (Point point : toolPoints().values()) {
+            least = Math.min(least, pose.y(tip.body(), point.x(), point.y()));
+        }
+        return least;
+    }
+
+    private Map<String, Point> toolPoints() {
+        return front.linkage().links().get(tip.body() - 1).points();
+    }
+}
