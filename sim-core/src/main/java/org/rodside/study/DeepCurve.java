@@ -172,15 +172,7 @@ final class DeepCurve {
             if (miss < SOLVED) {
                 return inBox(at, 0);
             }
-            for (int k = 1; k < free.length; k++) {
-                double kept = at[free[k]];
-                at[free[k]] = kept + DIFFERENCE;
-                sines(at, moved);
-                at[free[k]] = kept;
-                for (int m = 0; m < unknowns; m++) {
-                    equations.matrix()[m * unknowns + k - 1] = (moved[m] - side[m]) / DIFFERENCE;
-                }
-            }
+            derivatives(at);
             if (!equations.factor()) {
                 return false;
             }
@@ -193,6 +185,19 @@ final class DeepCurve {
             }
         }
         return false;
+    }
+
+    /** Derivatives of the sines by all but the first stroke, by differences. */
+    private void derivatives(double[] at) {
+        for (int k = 1; k < free.length; k++) {
+            double kept = at[free[k]];
+            at[free[k]] = kept + DIFFERENCE;
+            sines(at, moved);
+            at[free[k]] = kept;
+            for (int m = 0; m < unknowns; m++) {
+                equations.matrix()[m * unknowns + k - 1] = (moved[m] - side[m]) / DIFFERENCE;
+            }
+        }
     }
 
     private boolean inBox(double[] at, double margin) {
