@@ -2,10 +2,12 @@ package org.rodside.cli;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import org.rodside.io.CaseText;
 import org.rodside.io.JsonWriter;
+import org.rodside.model.InputException;
 import org.rodside.report.Cautions;
 import org.rodside.report.LoadsReport;
 import org.rodside.study.Front;
@@ -66,11 +68,28 @@ final class LoadsCommand implements Callable<Integer> {
         private List<String> own = new ArrayList<>();
 
         List<LoadCase> cases(Front front) {
-            List<LoadCase> cases = new ArrayList<>(WorstLoads.usualCases(
-                    front, CaseText.density("--density", Optional.ofNullable(density), WorstLoads.USUAL_DENSITY)));
-            CaseText.read("--case", own, cases.stream().map(LoadCase::name).toList())
-                    .forEach((name, load) -> cases.add(WorstLoads.given(front, name, load)));
+            List<String> faults = new ArrayList<>();
+            List<LoadCase> cases = new ArrayList<>(WorstLoads.usualCases(front, fill(faults)));
+            Map<String, double[]> read = Map.of();
+            try {
+                read = CaseText.read("--case", own, List.of("carry", "curl", "crowd"));
+            } catch (InputException e) {
+                faults.addAll(e.faults());
+            }
+            if (!faults.isEmpty()) {
+                throw new InputException(faults);
+            }
+            read.forEach((name, load) -> cases.add(WorstLoads.given(front, name, load)));
             return cases;
+        }
+
+        private double fill(List<String> faults) {
+            try {
+                return CaseText.density("--density", Optional.ofNullable(density), WorstLoads.USUAL_DENSITY);
+            } catch (InputException e) {
+                faults.addAll(e.faults());
+                return WorstLoads.USUAL_DENSITY;
+            }
         }
     }
 }

@@ -172,7 +172,9 @@ public final class LoadsReport {
         StringBuilder text = new StringBuilder(
                 "Worst loads on cylinders over the stroke box (+ push, - pull; each = the" + " harder-worked twin)\n");
         text.append(TextTable.of(cylinderHeadings(), worstCylinders()));
-        text.append("\nWorst bearing force at each pin\n").append(TextTable.of(bearingHeadings(), worstBearings()));
+        text.append(
+                        "\nWorst bearing force at each pin, pin on link; angle from +x in the link as drawn, anticlockwise\n")
+                .append(TextTable.of(bearingHeadings(), worstBearings()));
         text.append("\nRod side with its port blocked while the pump works on the cap side\n")
                 .append(TextTable.of(intensifiedHeadings(), intensifiedRows()));
         answer.notes().forEach(note -> text.append("Note: ").append(note).append('\n'));
@@ -239,7 +241,8 @@ public final class LoadsReport {
     }
 
     private List<String> bearingHeadings() {
-        return List.of("pin", "link", "case", heading("total", Quantity.FORCE));
+        return List.of(
+                "pin", "link", "case", heading("total", Quantity.FORCE), heading("angle in link", Quantity.ANGLE));
     }
 
     private List<List<String>> worstBearings() {
@@ -254,7 +257,8 @@ public final class LoadsReport {
                         mechanism.pinName(mechanism.bearingPin(load.bearing())),
                         mechanism.bodyName(mechanism.bearingBody(load.bearing())),
                         load.loadCase(),
-                        cell(load.total(), Quantity.FORCE))));
+                        cell(load.total(), Quantity.FORCE),
+                        cell(Math.atan2(load.y(), load.x()), Quantity.ANGLE))));
         return rows;
     }
 
@@ -290,7 +294,10 @@ public final class LoadsReport {
                 "The largest push and pull of each cylinder and the smallest buckling factor, each at its own pose; then the"
                         + " worst force at every pin.");
         page.table("Cylinders (+ push, - pull)", cylinderHeadings(), worstCylinders());
-        page.table("Pins", bearingHeadings(), worstBearings());
+        page.table(
+                "Pins: force of the pin on the link, angle from +x in the link as drawn",
+                bearingHeadings(),
+                worstBearings());
         page.table(
                 "Rod side with its port blocked while the pump works on the cap side",
                 intensifiedHeadings(),

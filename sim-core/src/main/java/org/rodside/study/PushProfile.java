@@ -1,6 +1,8 @@
 package org.rodside.study;
 
+import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.List;
 import org.rodside.hydraulics.Column;
 import org.rodside.kinematics.PoseBuffer;
 
@@ -76,10 +78,27 @@ final class PushProfile {
                         ? solver.cylinder(c) / column.critical(solver.pose().length(c))
                         : Double.NaN,
                 search.point(cell[c][best]));
-        solver.solve(top.at());
+        return worst(c, solver, top.at(), column);
+    }
+
+    /** The largest push at every stroke of the grid that has one; its factor is not told. */
+    List<Worst> pushes(int c) {
+        CaseSolver solver = new CaseSolver(front, load);
+        List<Worst> list = new ArrayList<>();
+        for (int at : cell[c]) {
+            if (at >= 0) {
+                list.add(worst(c, solver, search.point(at), null));
+            }
+        }
+        return list;
+    }
+
+    private static Worst worst(int c, CaseSolver solver, double[] at, Column column) {
+        solver.solve(at);
         PoseBuffer pose = solver.pose();
         double inclination = Math.atan2(Math.abs(pose.unitY(c)), Math.abs(pose.unitX(c)));
         double force = solver.cylinder(c);
-        return new Worst(column.factor(pose.length(c), force), force, pose.length(c), inclination);
+        double factor = column == null ? Double.NaN : column.factor(pose.length(c), force);
+        return new Worst(factor, force, pose.length(c), inclination);
     }
 }

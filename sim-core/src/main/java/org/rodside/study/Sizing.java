@@ -122,13 +122,16 @@ public final class Sizing {
                 .orElse(0);
     }
 
+    /** Cap side pressure that drives the worst push against back pressure and friction, theory (H4); in Pa. */
     private double pushPressure(int c, Cylinder cylinder) {
-        return CylinderPressure.of(cylinder, false).cap(worst(c, LoadsAnswer.Sense.PUSH));
+        double push = worst(c, LoadsAnswer.Sense.PUSH);
+        return push == 0 ? 0 : CylinderPressure.of(cylinder, false).drivingCap(push);
     }
 
+    /** As {@link #pushPressure} for the worst pull, rod side; in Pa. */
     private double pullPressure(int c, Cylinder cylinder) {
         double pull = worst(c, LoadsAnswer.Sense.PULL);
-        return pull == 0 ? 0 : CylinderPressure.of(cylinder, false).rod(-pull);
+        return pull == 0 ? 0 : CylinderPressure.of(cylinder, false).drivingRod(-pull);
     }
 
     private boolean pressureFits(int c, Cylinder cylinder) {
@@ -154,7 +157,7 @@ public final class Sizing {
                 pushPressure(c, cylinder),
                 pullPressure(c, cylinder),
                 worst.factor(),
-                loadedFactor(cylinder, worst),
+                loadedFactor(c, cylinder, worst),
                 mass(cylinder),
                 Math.abs(area.supply(question.speed())),
                 Math.abs(area.supply(-question.speed())),
@@ -162,14 +165,23 @@ public final class Sizing {
                 pressureFits(c, cylinder) && worst.factor() >= question.factor());
     }
 
-    private double loadedFactor(Cylinder cylinder, PushProfile.Worst worst) {
+    /** Smallest factor of the loaded column at its hardest pose and at the largest push of every stroke. */
+    private double loadedFactor(int c, Cylinder cylinder, PushProfile.Worst worst) {
         if (question.eccentricity().isEmpty() || Double.isInfinite(worst.factor())) {
             return Double.NaN;
         }
-        double each = worst.push() * cylinder.harderShare();
-        return LoadedColumn.of(cylinder, question.eccentricity().getAsDouble(), 0)
-                        .capacity(worst.length(), worst.inclination(), cylinder.yield())
-                / each;
+        LoadedColumn column = LoadedColumn.of(cylinder, question.eccentricity().getAsDouble(), 0);
+        double least = loadedFactor(column, cylinder, worst);
+        for (PushProfile profile : profiles) {
+            for (PushProfile.Worst push : profile.pushes(c)) {
+                least = Math.min(least, loadedFactor(column, cylinder, push));
+            }
+        }
+        return least;
+    }
+
+    private static double loadedFactor(LoadedColumn column, Cylinder cylinder, PushProfile.Worst at) {
+        return column.capacity(at.length(), at.inclination(), cylinder.yield()) / (at.push() * cylinder.harderShare());
     }
 
     /** Steel of tube and rod without eyes, piston and gland; in kg. */

@@ -7,6 +7,7 @@ import java.util.function.Consumer;
 import java.util.function.DoubleConsumer;
 import java.util.function.IntFunction;
 import org.rodside.hydraulics.Column;
+import org.rodside.hydraulics.CylinderLimits;
 import org.rodside.hydraulics.CylinderPressure;
 import org.rodside.kinematics.Mechanism;
 import org.rodside.model.Cylinder;
@@ -24,6 +25,9 @@ public final class WorstLoads {
 
     /** The usual first grid is this many times finer than for one quantity, for it serves them all; no unit. */
     private static final int REFINEMENT = 2;
+
+    /** A load beyond the relief by less than this share is at it; no unit. */
+    private static final double ROUNDING = 1e-6;
 
     private final Front front;
     private final Mechanism mechanism;
@@ -108,7 +112,31 @@ public final class WorstLoads {
         if (skipped > 0) {
             notes.add(skipped + " grid poses were left out: they do not assemble, or nothing limits the tool force.");
         }
+        for (LoadsAnswer.OnCylinder load : onCylinders) {
+            String beyond = beyondRelief(load);
+            if (!beyond.isEmpty()) {
+                notes.add(beyond);
+            }
+        }
+        for (LoadsAnswer.Intensified side : intensified()) {
+            if (side.relief() < side.rod()) {
+                notes.add(mechanism.cylinderName(side.cylinder())
+                        + ": blocking the rod port while the cap side is pumped drives the rod side past its relief.");
+            }
+        }
         return notes;
+    }
+
+    /** What to say where a load asks for more than the cylinder's relief holds; empty where it does not. */
+    private String beyondRelief(LoadsAnswer.OnCylinder load) {
+        CylinderLimits limits = front.limits(load.cylinder(), false);
+        double held = load.total() < 0 ? limits.holdingPull() : limits.holdingPush();
+        if (load.sense() == LoadsAnswer.Sense.BUCKLE || Math.abs(load.total()) <= held * (1 + ROUNDING)) {
+            return "";
+        }
+        return mechanism.cylinderName(load.cylinder()) + ", " + load.loadCase() + ": the worst "
+                + (load.total() < 0 ? "pull" : "push")
+                + " is more than the relief holds: the cylinder gives way before. Near a dead centre it has no upper end.";
     }
 
     private List<LoadsAnswer.Intensified> intensified() {

@@ -129,7 +129,7 @@ class WorstLoadsTest {
     void presentSizeIsJudgedByTheWorstLoads() {
         Front front = front("sallow-22.json");
         LoadsAnswer loads = find(front, 1, 1);
-        SizeQuestion question = new SizeQuestion(OptionalDouble.of(373e5), 1.9, 0.3, OptionalDouble.of(0.005));
+        SizeQuestion question = new SizeQuestion(OptionalDouble.of(385e5), 1.9, 0.3, OptionalDouble.of(0.005));
         List<SizeRow> rows = Sizing.find(front, loads, question, 2, done -> {});
         for (int c = 0; c < 3; c++) {
             int cylinder = c;
@@ -143,7 +143,9 @@ class WorstLoadsTest {
                     .min()
                     .orElseThrow();
             assertEquals(factor, present.bucklingFactor(), 1e-6 * factor);
-            assertTrue(present.carries(), "373 bar is where the reliefs open, factor 1.9 is below the smallest");
+            assertTrue(
+                    present.carries(),
+                    "reliefs open at 373 bar, friction takes less than 12 of 385, factor 1.9 is below the smallest");
             assertTrue(present.loadedFactor() < present.bucklingFactor());
         }
         assertTrue(rows.stream().allMatch(r -> r.present() || r.carries()));
