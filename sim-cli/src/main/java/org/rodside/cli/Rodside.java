@@ -20,6 +20,7 @@ import picocli.CommandLine.Spec;
         mixinStandardHelpOptions = true,
         synopsisSubcommandLabel = "COMMAND",
         subcommands = {
+            CheckCommand.class,
             PoseCommand.class,
             EnvelopeCommand.class,
             DigCommand.class,

@@ -25,8 +25,8 @@ import picocli.CommandLine.Mixin;
         footer = {"", "Example:", "  rodside study linkages/sallow-22.json"})
 final class StudyCommand implements Callable<Integer> {
 
-    private static final List<StudyPart> PARTS =
-            List.of(new EnvelopePart(), new DigPart(), new LiftPart(), new LoadsPart(), new SizePart());
+    private static final List<StudyPart> PARTS = List.of(
+            new CheckPart(), new EnvelopePart(), new DigPart(), new LiftPart(), new LoadsPart(), new SizePart());
 
     @Mixin
     private LinkageFile file;

@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Optional;
 import org.rodside.hydraulics.CylinderLimits;
 import org.rodside.kinematics.Mechanism;
+import org.rodside.kinematics.PoseSolver;
 import org.rodside.model.InputException;
 import org.rodside.model.Linkage;
 import org.rodside.model.Machine;
@@ -36,7 +37,28 @@ public final class Front {
      * @throws InputException where the drawing shows a loop at its dead centre
      */
     public static Front of(Linkage linkage) {
-        return new Front(linkage);
+        Front front = new Front(linkage);
+        if (!front.mechanism.staged()) {
+            front.movesAsDrawn();
+        }
+        return front;
+    }
+
+    /** Counting freedoms does not show a part that is locked while another is loose: the drawn pose does. */
+    private void movesAsDrawn() {
+        FrontSolver solver = new FrontSolver(this);
+        boolean moves = solver.place(drawnFractions()) == PoseSolver.ASSEMBLED;
+        for (int c = 0; c < mechanism.cylinders() && moves; c++) {
+            solver.travel(c);
+            for (int body = 1; body < mechanism.bodies(); body++) {
+                moves &= Double.isFinite(solver.motion().omega(body));
+            }
+        }
+        if (!moves) {
+            throw new InputException(
+                    "links: the linkage cannot move as drawn: one part of it is locked while another is loose,"
+                            + " or it stands at a dead centre; check which pins the links share, or draw another pose");
+        }
     }
 
     public Linkage linkage() {

@@ -69,16 +69,21 @@ public final class FrontSolver {
      * @param out x and y part; overwritten
      */
     public void travel(Place place, int cylinder, double[] out) {
-        Arrays.fill(rates, 0);
-        rates[cylinder] = 1;
-        poses.rates(pose, rates, motion);
+        travel(cylinder);
         double x = place.x(pose);
         double y = place.y(pose);
         out[0] = motion.vx(pose, place.body(), x, y);
         out[1] = motion.vy(pose, place.body(), x, y);
     }
 
-    /** Velocities left by the last {@link #travel}. */
+    /** Velocities of everything while one cylinder extends at 1 m/s and the others are locked: {@link #motion}. */
+    public void travel(int cylinder) {
+        Arrays.fill(rates, 0);
+        rates[cylinder] = 1;
+        poses.rates(pose, rates, motion);
+    }
+
+    /** Velocities left by the last travel. */
     public MotionBuffer motion() {
         return motion;
     }
