@@ -50,7 +50,7 @@ final class PushProfile {
     }
 
     private void take(int c, int slice, double force, int at) {
-        if (force > push[c][slice]) {
+        if (force > push[c][slice] && force < Double.POSITIVE_INFINITY) {
             push[c][slice] = force;
             cell[c][slice] = at;
         }

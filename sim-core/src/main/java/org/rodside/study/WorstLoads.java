@@ -109,6 +109,9 @@ public final class WorstLoads {
         } else if (front.tool().capacity().isEmpty()) {
             notes.add("The file has no tool.capacity: carry is with an empty bucket.");
         }
+        if (front.linkage().tool().isPresent() && front.crowd() < 0) {
+            notes.add("The file names no tool.crowd: the case crowd is left out.");
+        }
         if (skipped > 0) {
             notes.add(skipped + " grid poses were left out: they do not assemble, or nothing limits the tool force.");
         }

@@ -3,6 +3,7 @@ package org.rodside.study;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Arrays;
@@ -257,5 +258,30 @@ class LoadsSecondWayTest {
                 }
             }
         }
+    }
+
+    /**
+     * A lever whose cylinder ends its stroke in line with the pivot: the force grows without end there. What is told is
+     * finite, a note says that no relief holds it, and the pose in line is counted as left out or passed over.
+     */
+    @Test
+    void deadCentreIsToldNotHidden() {
+        String json = "{\"format\":\"rodside-linkage/1\",\"name\":\"dead\",\"units\":{\"length\":\"m\",\"mass\":\"kg\","
+                + "\"pressure\":\"bar\"},\"pins\":{\"p\":[0,0],\"c\":[-1,0],\"e\":[0,0.5]},\"frame\":{\"pins\":[\"p\",\"c\"]},"
+                + "\"links\":{\"arm\":{\"pins\":[\"p\",\"e\"],\"mass\":100,\"cg\":[1,0.5]}},\"cylinders\":{\"c\":{"
+                + "\"cap_pin\":\"c\",\"rod_pin\":\"e\",\"bore\":0.1,\"rod\":0.06,\"retracted\":0.8,\"stroke\":0.7,"
+                + "\"working\":250,\"relief\":280}}}";
+        Front front = Front.of(LinkageReader.read("dead.json", json.getBytes(StandardCharsets.UTF_8), List.of()));
+        LoadsAnswer answer = WorstLoads.find(front, WorstLoads.usualCases(front, 1800), 1, done -> {});
+        LoadsAnswer.OnCylinder pull = answer.cylinders().get(0);
+        assertTrue(pull.total() < -1e6 && pull.total() > Double.NEGATIVE_INFINITY, pull.toString());
+        assertTrue(pull.reliefMargin() < 1, pull.toString());
+        assertTrue(
+                answer.notes().stream().anyMatch(note -> note.contains("dead centre")),
+                answer.notes().toString());
+        SizeQuestion question = new SizeQuestion(OptionalDouble.empty(), 3.5, 0.3, OptionalDouble.empty());
+        SizeRow present = Sizing.find(front, answer, question, 1, done -> {}).get(0);
+        assertEquals(Double.POSITIVE_INFINITY, present.bucklingFactor(), 0.0, "it never pushes");
+        assertTrue(!present.carries());
     }
 }
