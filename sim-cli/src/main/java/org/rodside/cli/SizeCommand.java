@@ -25,7 +25,12 @@ import picocli.CommandLine.Option;
         name = "size",
         mixinStandardHelpOptions = true,
         description = "Standard bores and rods that would carry the worst loads, and what the present cylinders need.",
-        footer = {"", "Example:", "  rodside size linkages/sallow-22.json --pressure 380 --factor 3"})
+        footer = {
+            "",
+            "Examples:",
+            "  rodside size linkages/sallow-22.json --pressure 380 --factor 3",
+            "  rodside size linkages/sallow-22.json --column loaded --eccentricity 3"
+        })
 final class SizeCommand implements Callable<Integer> {
 
     @Mixin
@@ -48,6 +53,18 @@ final class SizeCommand implements Callable<Integer> {
 
     @Option(names = "--speed", paramLabel = "V", description = "Speed for the flows; in mm/s. Default: 300")
     private String speed;
+
+    /** How the column is judged. */
+    enum ColumnRule {
+        PLAIN,
+        LOADED
+    }
+
+    @Option(
+            names = "--column",
+            paramLabel = "plain|loaded",
+            description = "loaded adds the column with its own weight, limited by rod stress. Default: plain")
+    private ColumnRule column = ColumnRule.PLAIN;
 
     @Option(
             names = "--eccentricity",
@@ -89,8 +106,9 @@ final class SizeCommand implements Callable<Integer> {
     }
 
     private OptionalDouble eccentricity() {
-        return eccentricity == null
-                ? OptionalDouble.empty()
-                : OptionalDouble.of(LoadText.notBelow("--eccentricity", eccentricity, Unit.MILLIMETRE));
+        if (eccentricity == null) {
+            return column == ColumnRule.LOADED ? OptionalDouble.of(0) : OptionalDouble.empty();
+        }
+        return OptionalDouble.of(LoadText.notBelow("--eccentricity", eccentricity, Unit.MILLIMETRE));
     }
 }
