@@ -116,8 +116,14 @@ final class LineBuffer {
         double vy = sin[k] * table.travelX[i] + cos[k] * table.travelY[i];
         double originX = vx - turn[k] * (y[last] - y[k + 1]);
         double originY = vy + turn[k] * (x[last] - x[k + 1]);
-        travelX[k] = cos[last] * originX + sin[last] * originY;
-        travelY[k] = cos[last] * originY - sin[last] * originX;
+        if (k == last - 1) {
+            // From this stage alone, to the last bit: a duty keeps it from whichever line a thread meets first.
+            travelX[k] = table.cos[i] * table.travelX[i] + table.sin[i] * table.travelY[i];
+            travelY[k] = table.cos[i] * table.travelY[i] - table.sin[i] * table.travelX[i];
+        } else {
+            travelX[k] = cos[last] * originX + sin[last] * originY;
+            travelY[k] = cos[last] * originY - sin[last] * originX;
+        }
         double carried = sin[k] * table.carryX[i] + cos[k] * table.carryY[i];
         for (int j = k + 1; j <= last; j++) {
             double mass = sweep.table(j).mass();

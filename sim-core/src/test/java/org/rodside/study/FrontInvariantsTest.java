@@ -1,5 +1,6 @@
 package org.rodside.study;
 
+import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
@@ -27,6 +28,7 @@ import org.rodside.statics.ForceBuffer;
 import org.rodside.statics.LoadBuffer;
 import org.rodside.statics.Masses;
 import org.rodside.statics.StagedForceSolver;
+import org.rodside.table.Table;
 
 /** What must not change an answer, or must change it in a known way; both solvers on the example fronts. */
 class FrontInvariantsTest {
@@ -151,6 +153,25 @@ class FrontInvariantsTest {
         DigForce force = new Digging(front, Edge.TIP).curlAt(new double[] {0.4, 0.3, 0.3}, false);
         assertEquals(0, force.force());
         assertEquals("boom.relief.cap", force.limit());
+    }
+
+    @Test
+    void threadsGiveTheSameRows() {
+        Front front = front(FOLDER.resolve(DEMO));
+        Table one = rows(front, 1);
+        Table three = rows(front, 3);
+        assertEquals(21 * 21 * 21, one.rows());
+        assertEquals(one.rows(), three.rows());
+        for (int column = 0; column < one.columns().size(); column++) {
+            assertArrayEquals(one.column(column), three.column(column));
+        }
+    }
+
+    private static Table rows(Front front, int threads) {
+        DigSweep sweep = new DigSweep(front, Edge.TIP, false, 21);
+        Table table = new Table(sweep.columns());
+        sweep.rows(table, threads, done -> {});
+        return table;
     }
 
     private static Front front(Path file) {
