@@ -111,6 +111,11 @@ public final class HistoryReport {
         text.append(TextTable.of(headings(), rows()))
                 .append("\nPeak force at each pin\n")
                 .append(pinTable());
+        totals(text);
+        return text.toString();
+    }
+
+    private void totals(StringBuilder text) {
         text.append("\nLargest flow into all cylinders ")
                 .append(shown(history.flow(), Quantity.FLOW))
                 .append(" at ")
@@ -130,7 +135,6 @@ public final class HistoryReport {
                         .append(" % of what is there at ")
                         .append(TextTable.number(excess.time()))
                         .append(" s\n"));
-        return text.toString();
     }
 
     private String shown(double si, Quantity quantity) {

@@ -74,12 +74,7 @@ public final class HistoryAccumulator {
             int at = 1 + 6 * c;
             double speed = row[at + 1];
             double force = row[at + 2];
-            keep(c, Peak.PUSH, force);
-            keep(c, Peak.PULL, -force);
-            keep(c, Peak.SPEED, Math.abs(speed));
-            keep(c, Peak.CAP, row[at + 3]);
-            keep(c, Peak.ROD, row[at + 4]);
-            keep(c, Peak.FLOW, Math.abs(row[at + 5]));
+            keep(c, row, at);
             pumped += Math.abs(row[at + 5]);
             work += force * speed;
             judge(c, speed, force);
@@ -94,6 +89,15 @@ public final class HistoryAccumulator {
             }
         }
         fit = question.measured() ? Math.max(fit, row[row.length - 1]) : fit;
+    }
+
+    private void keep(int c, double[] row, int at) {
+        keep(c, Peak.PUSH, row[at + 2]);
+        keep(c, Peak.PULL, -row[at + 2]);
+        keep(c, Peak.SPEED, Math.abs(row[at + 1]));
+        keep(c, Peak.CAP, row[at + 3]);
+        keep(c, Peak.ROD, row[at + 4]);
+        keep(c, Peak.FLOW, Math.abs(row[at + 5]));
     }
 
     private void totals(double pumped, double work) {

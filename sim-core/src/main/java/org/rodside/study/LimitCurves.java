@@ -3,6 +3,7 @@ package org.rodside.study;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.SplittableRandom;
 import org.rodside.kinematics.PoseSolver;
 
 /**
@@ -15,6 +16,11 @@ final class LimitCurves {
 
     /** Largest distance of a curve from its polyline; in m. Far below the millimetre that is promised. */
     private static final double FLAT = 1e-5;
+
+    /** Poses tried to learn which cylinders move the place, and the travel that counts as none; no unit. */
+    private static final int SAMPLES = 20;
+
+    private static final double STILL = 1e-9;
 
     private static final int EDGE_PARTS = 24;
     private static final int DEEPEST_SPLIT = 12;
@@ -33,10 +39,14 @@ final class LimitCurves {
     }
 
     List<LimitCurve> trace() {
+        int movers = movers();
         for (int mask = 1; mask < 1 << cylinders; mask++) {
+            if ((mask & ~movers) != 0) {
+                continue;
+            }
             int[] free = axes(mask);
-            for (int ends = 0; ends < 1 << (cylinders - free.length); ends++) {
-                double[] at = corner(mask, ends);
+            for (int ends = 0; ends < 1 << (Integer.bitCount(movers) - free.length); ends++) {
+                double[] at = corner(mask, movers, ends);
                 if (free.length == 1) {
                     edge(at, free[0]);
                 } else if (free.length == 2) {
@@ -60,11 +70,28 @@ final class LimitCurves {
         return list.stream().mapToInt(Integer::intValue).toArray();
     }
 
-    private double[] corner(int mask, int ends) {
+    /** Cylinders that move the place at all, as bits; the others would only repeat every curve. */
+    private int movers() {
+        int movers = 0;
+        double[] travel = new double[2];
+        SplittableRandom random = new SplittableRandom(1);
+        for (int sample = 0; sample < SAMPLES; sample++) {
+            if (solver.place(random.doubles(cylinders).toArray()) == PoseSolver.ASSEMBLED) {
+                for (int c = 0; c < cylinders; c++) {
+                    solver.travel(place, c, travel);
+                    movers |= Math.hypot(travel[0], travel[1]) > STILL ? 1 << c : 0;
+                }
+            }
+        }
+        return movers;
+    }
+
+    private double[] corner(int mask, int movers, int ends) {
         double[] at = new double[cylinders];
+        Arrays.fill(at, 0.5);
         int bit = 0;
         for (int c = 0; c < cylinders; c++) {
-            if ((mask >> c & 1) == 0) {
+            if ((mask >> c & 1) == 0 && (movers >> c & 1) == 1) {
                 at[c] = ends >> bit++ & 1;
             }
         }
