@@ -27,6 +27,7 @@ import picocli.CommandLine.Spec;
             LiftCommand.class,
             LoadsCommand.class,
             SizeCommand.class,
+            DutyCommand.class,
             HistoryCommand.class,
             CyclesCommand.class,
             StudyCommand.class
