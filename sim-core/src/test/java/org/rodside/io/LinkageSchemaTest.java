@@ -106,8 +106,9 @@ class LinkageSchemaTest {
     @Test
     void everyLinkageOfTheRepositoryPassesBoth() throws IOException {
         try (Stream<Path> files = Files.list(Drawn.EXAMPLE.getParent())) {
-            List<Path> linkages =
-                    files.filter(file -> file.toString().endsWith(".json")).toList();
+            List<Path> linkages = files.filter(file -> file.toString().endsWith(".json")
+                            && !file.toString().endsWith("-pass.json"))
+                    .toList();
             int read = 0;
             for (Path file : linkages) {
                 JsonNode root = Drawn.JSON.readTree(Files.readAllBytes(file));
