@@ -152,6 +152,9 @@ public final class DutySource implements RowSource, Closeable {
             faults.add(name + ": measured pressures want cap and rod side of every cylinder; " + pressures + " of "
                     + 2 * cylinders + " columns are there");
         }
+        if (pressures > 0 && cylinders < 2) {
+            faults.add(name + ": the two parts of a tip force cannot be told from the pressures of one cylinder");
+        }
         measured = pressures == 2 * cylinders;
     }
 

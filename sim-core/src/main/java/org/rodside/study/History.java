@@ -86,6 +86,12 @@ public final class History {
                         source.name() + ": at time_s " + rows[i][0] + " the linkage does not assemble; link '"
                                 + front.mechanism().bodyName(status) + "' cannot be placed");
             }
+            int unbalanced = solver.unbalanced(out);
+            if (unbalanced >= 0) {
+                throw new InputException(source.name() + ": at time_s " + rows[i][0]
+                        + " the linkage stands at a dead centre; no force of cylinder '"
+                        + front.mechanism().cylinderName(unbalanced) + "' can be told");
+            }
             summary.accept(out);
             sink.row(out);
         }

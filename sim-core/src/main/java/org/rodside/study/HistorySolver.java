@@ -168,22 +168,23 @@ final class HistorySolver {
     private void fitTip(double[] row) {
         double xx = 0;
         double xy = 0;
-        double yy = 0;
-        double bx = 0;
-        double by = 0;
+        double xf = 0;
         for (int c = 0; c < given.length; c++) {
-            double left = measured(row, c) - forces.cylinder(c);
             double ux = unitX.cylinder(c);
-            double uy = unitY.cylinder(c);
             xx += ux * ux;
-            xy += ux * uy;
-            yy += uy * uy;
-            bx += ux * left;
-            by += uy * left;
+            xy += ux * unitY.cylinder(c);
+            xf += ux * (measured(row, c) - forces.cylinder(c));
         }
-        double det = xx * yy - xy * xy;
-        tipForceX = (yy * bx - xy * by) / det;
-        tipForceY = (xx * by - xy * bx) / det;
+        // The second column is made square to the first: the sums of both together would lose half of the digits.
+        double yy = 0;
+        double yf = 0;
+        for (int c = 0; c < given.length; c++) {
+            double square = unitY.cylinder(c) - xy / xx * unitX.cylinder(c);
+            yy += square * square;
+            yf += square * (measured(row, c) - forces.cylinder(c));
+        }
+        tipForceY = yf / yy;
+        tipForceX = (xf - xy * tipForceY) / xx;
         double squares = 0;
         for (int c = 0; c < given.length; c++) {
             double residual = measured(row, c)
@@ -222,6 +223,16 @@ final class HistorySolver {
         if (question.measured()) {
             out[i] = fit;
         }
+    }
+
+    /** First cylinder whose force is no finite number in a row written last; -1 where all are. */
+    int unbalanced(double[] out) {
+        for (int c = 0; c < given.length; c++) {
+            if (!Double.isFinite(out[3 + 6 * c] + forces.cylinder(c))) {
+                return c;
+            }
+        }
+        return -1;
     }
 
     /** The pose, motion and masses of the instant solved last, for checks; not to be modified. */

@@ -1,8 +1,10 @@
 package org.rodside.study;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Arrays;
@@ -18,6 +20,7 @@ import org.rodside.io.LinkageReader;
 import org.rodside.kinematics.Mechanism;
 import org.rodside.kinematics.MotionBuffer;
 import org.rodside.kinematics.PoseBuffer;
+import org.rodside.model.InputException;
 import org.rodside.model.Linkage;
 import org.rodside.statics.Masses;
 import org.rodside.table.RowSource;
@@ -264,5 +267,26 @@ class HistoryTest {
             assertTrue(Math.abs(moving[3 + 6 * c] - still[3 + 6 * c]) > 1);
             assertEquals(moving[2 + 6 * c], still[2 + 6 * c], 0.0, "speeds are told all the same");
         }
+    }
+
+    /** An arm on one cylinder that reaches its dead centre, where it can carry nothing, when it is all out. */
+    @Test
+    void refusesADeadCentre() {
+        String text = """
+                {"format": "rodside-linkage/1", "name": "arm", "units": {"length": "m", "mass": "kg", "pressure": "bar"},
+                 "pins": {"foot": [0, 0], "anchor": [-1, 0], "eye": [0, 1]}, "frame": {"pins": ["foot", "anchor"]},
+                 "links": {"arm": {"pins": ["foot", "eye"], "mass": 100, "cg": [0.5, 0.5]}},
+                 "cylinders": {"lift": {"cap_pin": "anchor", "rod_pin": "eye", "bore": 0.1, "rod": 0.05,
+                   "retracted": 1.2, "stroke": 0.8, "working": 200, "relief": 250}},
+                 "tool": {"link": "arm", "tip": "eye", "hook": "eye", "curl": "lift"}}
+                """;
+        Front front = Front.of(LinkageReader.read("arm.json", text.getBytes(StandardCharsets.UTF_8), List.of()));
+        double[] clear = {0, 0.3, 0, 0, 0, Double.NaN, Double.NaN};
+        double[] dead = {1, 0.8, 0, 0, 0, Double.NaN, Double.NaN};
+        assertEquals(1, run(front, List.<double[]>of(clear), false, true, 8).size());
+        InputException fault =
+                assertThrows(InputException.class, () -> run(front, List.of(clear, dead), false, true, 8));
+        assertTrue(fault.getMessage().contains("dead centre"), fault.getMessage());
+        assertTrue(fault.getMessage().contains("time_s 1.0"), fault.getMessage());
     }
 }
