@@ -140,8 +140,10 @@ public final class DutySource implements RowSource, Closeable {
             pressures += from[4 + cylinders + 2 * c] == null ? 0 : 1;
             pressures += from[5 + cylinders + 2 * c] == null ? 0 : 1;
         }
-        boolean tipX = from[1 + cylinders] != null;
-        boolean tipY = from[2 + cylinders] != null;
+        pressuresOrTip(pressures, from[1 + cylinders] != null, from[2 + cylinders] != null, faults);
+    }
+
+    private void pressuresOrTip(int pressures, boolean tipX, boolean tipY, List<String> faults) {
         if (tipX != tipY) {
             faults.add(name + ": tip.x and tip.y go together; give both columns or neither");
         }
