@@ -184,13 +184,17 @@ class CoreCommandsTest {
                 : new String[] {command, FRONT, "--at", AT};
     }
 
+    /** Every file of the working folder with its time: one written over by an earlier test shows as well. */
     private static List<String> files(Path where) throws IOException {
-        try (var entries = Files.walk(where, 2)) {
-            return entries.map(Path::toString)
-                    .filter(name -> !name.contains("target"))
+        List<String> files = new ArrayList<>();
+        try (var entries = Files.walk(where)) {
+            for (Path path : entries.filter(file -> !file.startsWith("./target"))
                     .sorted()
-                    .toList();
+                    .toList()) {
+                files.add(path + " " + Files.getLastModifiedTime(path));
+            }
         }
+        return files;
     }
 
     private JsonNode json(String... args) throws IOException {
