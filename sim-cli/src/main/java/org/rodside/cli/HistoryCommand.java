@@ -64,7 +64,6 @@ final class HistoryCommand implements Callable<Integer> {
     public Integer call() {
         OptionalDouble flow = LoadText.above("--pump", Optional.ofNullable(pump), Unit.LITRE_PER_MINUTE);
         Front front = Front.of(file.read(common));
-        front.tool();
         try (DutySource source = new DutySource(duty, front.linkage())) {
             HistoryQuestion question =
                     new HistoryQuestion(source.measured(), atRest, flow.orElse(Double.POSITIVE_INFINITY));

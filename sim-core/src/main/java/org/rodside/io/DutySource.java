@@ -140,6 +140,15 @@ public final class DutySource implements RowSource, Closeable {
             pressures += from[4 + cylinders + 2 * c] == null ? 0 : 1;
             pressures += from[5 + cylinders + 2 * c] == null ? 0 : 1;
         }
+        boolean onTool = pressures > 0
+                || from[1 + cylinders] != null
+                || from[2 + cylinders] != null
+                || from[3 + cylinders] != null;
+        if (onTool && linkage.tool().isEmpty()) {
+            faults.add(
+                    name + ": tip force, payload and measured pressures act on the tool, and the linkage file has none;"
+                            + " leave the columns out or add \"tool\"");
+        }
         pressuresOrTip(pressures, from[1 + cylinders] != null, from[2 + cylinders] != null, faults);
     }
 

@@ -30,7 +30,6 @@ public final class History {
     }
 
     History(Front front, HistoryQuestion question, int block) {
-        front.tool();
         this.front = front;
         Mechanism mechanism = front.mechanism();
         solver = new HistorySolver(front, question);

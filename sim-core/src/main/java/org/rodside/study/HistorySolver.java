@@ -55,8 +55,9 @@ final class HistorySolver {
         forces = new ForceBuffer(mechanism);
         unitX = new ForceBuffer(mechanism);
         unitY = new ForceBuffer(mechanism);
-        tip = front.tip();
-        fill = front.fill();
+        boolean tool = front.linkage().tool().isPresent();
+        tip = tool ? front.tip() : null;
+        fill = tool ? front.fill() : null;
         List<Cylinder> cylinders = front.linkage().cylinders();
         areas = cylinders.stream().map(CylinderArea::of).toList();
         pressures = cylinders.stream().map(c -> CylinderPressure.of(c, false)).toList();
@@ -123,12 +124,20 @@ final class HistorySolver {
     private void load(double payload) {
         loads.clear();
         front.masses().addWeights(pose, loads);
+        if (!question.atRest()) {
+            front.masses().addInertia(pose, motion, loads);
+        }
+        if (payload != 0) {
+            addPayload(payload);
+        }
+    }
+
+    private void addPayload(double payload) {
         double ax = 0;
         double ay = 0;
         double x = fill.x(pose);
         double y = fill.y(pose);
         if (!question.atRest()) {
-            front.masses().addInertia(pose, motion, loads);
             ax = motion.ax(pose, fill.body(), x, y);
             ay = motion.ay(pose, fill.body(), x, y);
         }
@@ -147,7 +156,9 @@ final class HistorySolver {
         } else {
             tipForceX = row[1 + n];
             tipForceY = row[2 + n];
-            loads.add(tip.body(), tip.x(pose), tip.y(pose), tipForceX, tipForceY);
+            if (tip != null) {
+                loads.add(tip.body(), tip.x(pose), tip.y(pose), tipForceX, tipForceY);
+            }
             solver.solve(pose, loads, forces);
         }
     }
@@ -209,8 +220,8 @@ final class HistorySolver {
             out[i++] = question.measured() ? row[at + 1] : pressures.get(c).rod(force);
             out[i++] = areas.get(c).supply(rates[c]);
         }
-        out[i++] = tip.x(pose);
-        out[i++] = tip.y(pose);
+        out[i++] = tip == null ? Double.NaN : tip.x(pose);
+        out[i++] = tip == null ? Double.NaN : tip.y(pose);
         out[i++] = tipForceX;
         out[i++] = tipForceY;
         for (int b = 0; b < mechanism.bearings(); b++) {

@@ -33,6 +33,12 @@ public final class Outline {
         double startGap(double atX, double atY) {
             return Math.hypot(x[0] - atX, y[0] - atY);
         }
+
+        /** Whether the piece goes well away from its start, so that an end near it closes a ring. */
+        boolean turnsBack() {
+            int middle = x.length / 2;
+            return startGap(x[middle], y[middle]) > 10 * JOIN;
+        }
     }
 
     private Outline(Front front) {
@@ -157,34 +163,44 @@ public final class Outline {
         return new Piece(x, y);
     }
 
-    /** Joins pieces from the first one left until the ring closes; null where it does not. */
+    /**
+     * Joins pieces from the first one left until the chain meets itself; what led up to there waits for another ring. A piece
+     * that leads nowhere is dropped: near a touching of two curves some are cut too finely to be told apart. Null where nothing
+     * closes.
+     */
     private double[][] ring() {
         List<Piece> chain = new ArrayList<>(List.of(bounds.remove(0)));
-        Piece first = chain.get(0);
-        while (true) {
+        while (!chain.isEmpty()) {
             Piece last = chain.get(chain.size() - 1);
-            double endX = last.x()[last.x().length - 1];
-            double endY = last.y()[last.y().length - 1];
-            Piece next = null;
-            double least = JOIN;
-            for (Piece piece : bounds) {
-                double gap = piece.startGap(endX, endY);
-                if (gap < least) {
-                    least = gap;
-                    next = piece;
-                }
+            int home = startsNearEnd(last.turnsBack() ? chain : chain.subList(0, chain.size() - 1), last);
+            if (home >= 0) {
+                bounds.addAll(chain.subList(0, home));
+                return closed(chain.subList(home, chain.size()));
             }
-            double home = first.startGap(endX, endY);
-            if (home <= least) {
-                return closed(chain);
+            int next = startsNearEnd(bounds, last);
+            if (next < 0) {
+                chain.remove(chain.size() - 1);
+            } else {
+                chain.add(bounds.remove(next));
             }
-            if (next == null) {
-                bounds.addAll(chain.subList(1, chain.size()));
-                return null;
-            }
-            bounds.remove(next);
-            chain.add(next);
         }
+        return null;
+    }
+
+    /** Index of the piece that starts nearest the end of another, within {@link #JOIN}; -1 where none does. */
+    private static int startsNearEnd(List<Piece> pieces, Piece piece) {
+        double endX = piece.x()[piece.x().length - 1];
+        double endY = piece.y()[piece.y().length - 1];
+        int nearest = -1;
+        double least = JOIN;
+        for (int i = 0; i < pieces.size(); i++) {
+            double gap = pieces.get(i).startGap(endX, endY);
+            if (gap < least) {
+                least = gap;
+                nearest = i;
+            }
+        }
+        return nearest;
     }
 
     private static double[][] closed(List<Piece> chain) {
