@@ -21,6 +21,9 @@ public final class Outline {
     /** Ends closer than this join; in m. */
     private static final double JOIN = 9e-4;
 
+    /** Ends closer than this meet exactly; of pieces that do, the one with more points is the surer; in m. */
+    private static final double EXACT = 2e-5;
+
     /** Rings that enclose less than this are rounding; in m². */
     private static final double SMALL = 1e-5;
 
@@ -194,8 +197,11 @@ public final class Outline {
         int nearest = -1;
         double least = JOIN;
         for (int i = 0; i < pieces.size(); i++) {
-            double gap = pieces.get(i).startGap(endX, endY);
-            if (gap < least) {
+            double gap = Math.max(EXACT, pieces.get(i).startGap(endX, endY));
+            boolean longer = nearest >= 0
+                    && gap == least
+                    && pieces.get(i).x().length > pieces.get(nearest).x().length;
+            if (gap < least || longer) {
                 least = gap;
                 nearest = i;
             }
