@@ -2,7 +2,6 @@ package org.rodside.cli;
 
 import org.rodside.report.LoadsReport;
 import org.rodside.study.LoadsAnswer;
-import org.rodside.study.WorstLoads;
 
 /** Worst loads as part of {@code study}. */
 final class LoadsPart implements StudyPart {
@@ -14,11 +13,7 @@ final class LoadsPart implements StudyPart {
 
     @Override
     public Told tell(Desk desk) {
-        LoadsAnswer answer = WorstLoads.find(
-                desk.front(),
-                WorstLoads.usualCases(desk.front(), WorstLoads.USUAL_DENSITY),
-                desk.common().threads(),
-                done -> {});
+        LoadsAnswer answer = desk.loads().get();
         LoadsReport report = new LoadsReport(desk.front(), answer, desk.common().units());
         desk.folder().ifPresent(folder -> {
             report.files(folder);

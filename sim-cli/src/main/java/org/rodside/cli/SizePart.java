@@ -7,7 +7,6 @@ import org.rodside.study.LoadsAnswer;
 import org.rodside.study.SizeQuestion;
 import org.rodside.study.SizeRow;
 import org.rodside.study.Sizing;
-import org.rodside.study.WorstLoads;
 
 /** Cylinder sizes as part of {@code study}. */
 final class SizePart implements StudyPart {
@@ -22,8 +21,7 @@ final class SizePart implements StudyPart {
         int threads = desk.common().threads();
         SizeQuestion question = new SizeQuestion(
                 OptionalDouble.empty(), SizeQuestion.USUAL_FACTOR, SizeQuestion.USUAL_SPEED, OptionalDouble.empty());
-        LoadsAnswer loads = WorstLoads.find(
-                desk.front(), WorstLoads.usualCases(desk.front(), WorstLoads.USUAL_DENSITY), threads, done -> {});
+        LoadsAnswer loads = desk.loads().get();
         List<SizeRow> rows = Sizing.find(desk.front(), loads, question, threads, done -> {});
         SizeReport report =
                 new SizeReport(desk.front(), question, rows, desk.common().units());

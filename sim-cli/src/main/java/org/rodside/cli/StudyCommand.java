@@ -52,7 +52,7 @@ final class StudyCommand implements Callable<Integer> {
         }
         page.cautions();
         told.put("name", linkage.name());
-        answer(new StudyPart.Desk(front, common, folder, page));
+        answer(new StudyPart.Desk(front, common, folder, page, new LoadsOnce(front, common.threads())));
         told.put("left_out", leftOut);
         told.put("cautions", Cautions.estimates());
         folder.ifPresent(

@@ -3,14 +3,20 @@ package org.rodside.cli;
 import java.nio.file.Path;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.Supplier;
 import org.rodside.report.PageWriter;
 import org.rodside.study.Front;
+import org.rodside.study.LoadsAnswer;
 
 /** One question among those that {@code study} asks: computes, writes its files, adds its section to the page. */
 interface StudyPart {
 
-    /** What a part works on. {@code folder} is empty where no files are wanted. */
-    record Desk(Front front, CommonOptions common, Optional<Path> folder, PageWriter page) {}
+    /**
+     * What a part works on. {@code folder} is empty where no files are wanted; {@code loads} are the worst loads of the usual
+     * cases, searched once when first asked for.
+     */
+    record Desk(
+            Front front, CommonOptions common, Optional<Path> folder, PageWriter page, Supplier<LoadsAnswer> loads) {}
 
     /** What a part found: a JSON tree, and text for the one-page summary. */
     record Told(Map<String, Object> json, String text) {}
