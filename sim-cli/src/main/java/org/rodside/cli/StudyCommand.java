@@ -16,6 +16,7 @@ import org.rodside.report.PageWriter;
 import org.rodside.study.Front;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Option;
 
 /** The command {@code study}: every question in one run, one page of summary, all files and a report. */
 @Command(
@@ -26,13 +27,25 @@ import picocli.CommandLine.Mixin;
 final class StudyCommand implements Callable<Integer> {
 
     private static final List<StudyPart> PARTS = List.of(
-            new CheckPart(), new EnvelopePart(), new DigPart(), new LiftPart(), new LoadsPart(), new SizePart());
+            new CheckPart(),
+            new EnvelopePart(),
+            new DigPart(),
+            new LiftPart(),
+            new LoadsPart(),
+            new SizePart(),
+            new PassPart());
 
     @Mixin
     private LinkageFile file;
 
     @Mixin
     private CommonOptions common;
+
+    @Option(
+            names = "--pass",
+            paramLabel = "PASS.json",
+            description = "Pass for duty, history and cycles. Default: <file stem>-pass.json beside the linkage file")
+    private Path pass;
 
     private final Map<String, Object> told = new LinkedHashMap<>();
     private final Map<String, Object> leftOut = new LinkedHashMap<>();
@@ -52,7 +65,13 @@ final class StudyCommand implements Callable<Integer> {
         }
         page.cautions();
         told.put("name", linkage.name());
-        answer(new StudyPart.Desk(front, common, folder, page, new LoadsOnce(front, common.threads())));
+        answer(new StudyPart.Desk(
+                front,
+                common,
+                folder,
+                page,
+                new LoadsOnce(front, common.threads()),
+                pass == null ? PassPart.usual(file.path()) : pass));
         told.put("left_out", leftOut);
         told.put("cautions", Cautions.estimates());
         folder.ifPresent(

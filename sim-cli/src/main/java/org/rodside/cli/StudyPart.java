@@ -13,10 +13,15 @@ interface StudyPart {
 
     /**
      * What a part works on. {@code folder} is empty where no files are wanted; {@code loads} are the worst loads of the usual
-     * cases, searched once when first asked for.
+     * cases, searched once when first asked for; {@code pass} is the pass file, which may not exist.
      */
     record Desk(
-            Front front, CommonOptions common, Optional<Path> folder, PageWriter page, Supplier<LoadsAnswer> loads) {}
+            Front front,
+            CommonOptions common,
+            Optional<Path> folder,
+            PageWriter page,
+            Supplier<LoadsAnswer> loads,
+            Path pass) {}
 
     /** What a part found: a JSON tree, and text for the one-page summary. */
     record Told(Map<String, Object> json, String text) {}

@@ -57,6 +57,16 @@ public final class DutyReport {
         PictureFile.write(folder.resolve("tip-force.png"), tipForce());
     }
 
+    /** The section of the report page. */
+    public void section(PageWriter page) {
+        page.section(
+                "A pass",
+                "From waypoints to duty, load history and cycles; the rows are in duty.csv, history.csv, cycles.csv.");
+        page.figure(path(), "Path of the tip.", PageWriter.DRAWING);
+        page.figure(tipForce(), "Force of the ground on the tip.", PageWriter.DRAWING);
+        history().tables(page);
+    }
+
     private Plot path() {
         FrontSolver solver = new FrontSolver(front);
         double[] x = new double[duty.rows()];

@@ -164,6 +164,14 @@ public final class HistoryReport {
         return rows;
     }
 
+    /** Peaks of the cylinders for the report page, and what could not be given. */
+    void tables(PageWriter page) {
+        page.table("Peaks of the cylinders", headings(), rows());
+        history.excesses()
+                .forEach(excess -> page.note("Exceeded: " + excess.cause() + " in " + excess.rows() + " rows, worst "
+                        + TextTable.number(100 * excess.worst()) + " % of what is there"));
+    }
+
     private String pinTable() {
         Map<Integer, Integer> worst = new LinkedHashMap<>();
         for (int b = 0; b < mechanism.bearings(); b++) {

@@ -65,10 +65,11 @@ public final class DutyMaker {
     /** Runs a duty through the history, rows dropped, to learn where cylinders or pump cannot follow. */
     public static HistoryAccumulator judge(Front front, Table duty, double pump) {
         RowSink drop = row -> {};
-        return new History(front, new HistoryQuestion(false, false, pump)).run(rows(front, duty), drop, time -> {});
+        return new History(front, new HistoryQuestion(false, false, pump)).run(source(front, duty), drop, time -> {});
     }
 
-    private static RowSource rows(Front front, Table duty) {
+    /** The rows of a made duty as a history reads them. */
+    static RowSource source(Front front, Table duty) {
         int cylinders = front.mechanism().cylinders();
         return new RowSource() {
             private int row;
