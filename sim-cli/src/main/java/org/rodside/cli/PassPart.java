@@ -37,16 +37,7 @@ final class PassPart implements StudyPart {
             throw new InputException(desk.pass() + ": there is no such file; name a pass with --pass PASS.json");
         }
         Table duty = DutyMaker.make(front, DutyPassReader.read(desk.pass(), front.linkage()));
-        PassRun[] made = new PassRun[1];
-        desk.folder()
-                .ifPresentOrElse(
-                        folder -> CsvWriter.write(
-                                folder.resolve("history.csv"),
-                                PassRun.columns(front),
-                                units,
-                                sink -> made[0] = PassRun.of(front, duty, units, sink)),
-                        () -> made[0] = PassRun.of(front, duty, units, row -> {}));
-        PassRun run = made[0];
+        PassRun run = run(desk, duty);
         DutyReport report = new DutyReport(front, duty, run.met(), units);
         desk.folder().ifPresent(folder -> {
             CycleTables tables = new CycleTables(run.all());
@@ -61,5 +52,20 @@ final class PassPart implements StudyPart {
                 json,
                 "A pass from " + desk.pass().getFileName() + "\n" + report.text() + "\n"
                         + new CyclesReport(run.cylinders()).text());
+    }
+
+    private static PassRun run(Desk desk, Table duty) {
+        Front front = desk.front();
+        UnitSystem units = desk.common().units();
+        PassRun[] made = new PassRun[1];
+        desk.folder()
+                .ifPresentOrElse(
+                        folder -> CsvWriter.write(
+                                folder.resolve("history.csv"),
+                                PassRun.columns(front),
+                                units,
+                                sink -> made[0] = PassRun.of(front, duty, units, sink)),
+                        () -> made[0] = PassRun.of(front, duty, units, row -> {}));
+        return made[0];
     }
 }
