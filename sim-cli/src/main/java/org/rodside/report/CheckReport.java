@@ -17,13 +17,15 @@ public final class CheckReport {
     private final Front front;
     private final ClosureAnswer answer;
     private final UnitSystem units;
+    private final Shown shown;
     private final List<String> cylinders;
 
     public CheckReport(Front front, ClosureAnswer answer, UnitSystem units) {
         this.front = front;
         this.answer = answer;
         this.units = units;
-        cylinders = front.linkage().cylinders().stream().map(Cylinder::name).toList();
+        shown = new Shown(units);
+        cylinders = Shown.cylinders(front.linkage());
     }
 
     /** The answer as a JSON tree. */
@@ -92,7 +94,7 @@ public final class CheckReport {
                 .append(" poses over the whole stroke box assemble.\n");
         answer.firstFailure()
                 .ifPresent(at -> text.append("First pose that does not: ")
-                        .append(pose(at))
+                        .append(Shown.pose(cylinders, at))
                         .append("; link '")
                         .append(answer.failingLink())
                         .append("' cannot be placed there.\n"));
@@ -102,14 +104,13 @@ public final class CheckReport {
     }
 
     private List<String> headings() {
-        String length = units.unit(Quantity.LENGTH).symbol();
         return List.of(
                 "cylinder",
-                "stroke, " + length,
+                shown.heading("stroke", Quantity.LENGTH),
                 "fails from",
                 "to",
                 "smallest transmission angle, deg",
-                "smallest lever arm, " + length,
+                shown.heading("smallest lever arm", Quantity.LENGTH),
                 "arm at");
     }
 
@@ -119,12 +120,12 @@ public final class CheckReport {
             Cylinder cylinder = front.linkage().cylinders().get(corner.cylinder());
             rows.add(List.of(
                     cylinder.name(),
-                    TextTable.number(units.of(cylinder.stroke(), Quantity.LENGTH)),
+                    shown.cell(cylinder.stroke(), Quantity.LENGTH),
                     TextTable.number(corner.smallestFailing()),
                     TextTable.number(corner.largestFailing()),
-                    TextTable.number(units.of(corner.angle(), Quantity.ANGLE)),
-                    TextTable.number(units.of(corner.arm(), Quantity.LENGTH)),
-                    pose(corner.armAt())));
+                    shown.cell(corner.angle(), Quantity.ANGLE),
+                    shown.cell(corner.arm(), Quantity.LENGTH),
+                    Shown.pose(cylinders, corner.armAt())));
         }
         return rows;
     }
@@ -135,18 +136,10 @@ public final class CheckReport {
             if (corner.angle() < Closure.SMALL_ANGLE) {
                 lines.add(
                         "Close to a dead centre: cylinder " + cylinders.get(corner.cylinder()) + ", transmission angle "
-                                + TextTable.number(units.of(corner.angle(), Quantity.ANGLE)) + " deg at "
-                                + pose(corner.angleAt()));
+                                + shown.cell(corner.angle(), Quantity.ANGLE) + " deg at "
+                                + Shown.pose(cylinders, corner.angleAt()));
             }
         }
         return lines;
-    }
-
-    private String pose(double[] at) {
-        List<String> parts = new ArrayList<>();
-        for (int c = 0; c < at.length; c++) {
-            parts.add(cylinders.get(c) + " " + TextTable.number(at[c]));
-        }
-        return String.join(", ", parts);
     }
 }

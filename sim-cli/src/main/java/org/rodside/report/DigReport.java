@@ -10,7 +10,6 @@ import java.util.function.Consumer;
 import org.rodside.chart.Bands;
 import org.rodside.chart.Plot;
 import org.rodside.io.CsvWriter;
-import org.rodside.model.Cylinder;
 import org.rodside.study.DigForce;
 import org.rodside.study.DigSummary;
 import org.rodside.study.Front;
@@ -28,12 +27,14 @@ public final class DigReport {
 
     private final Front front;
     private final UnitSystem units;
+    private final Shown shown;
     private final List<String> cylinders;
 
     public DigReport(Front front, UnitSystem units) {
         this.front = front;
         this.units = units;
-        cylinders = front.linkage().cylinders().stream().map(Cylinder::name).toList();
+        shown = new Shown(units);
+        cylinders = Shown.cylinders(front.linkage());
     }
 
     /** One pose as JSON; crowd is null where the linkage has no crowd cylinder. */
@@ -78,20 +79,12 @@ public final class DigReport {
     }
 
     private List<String> headings() {
-        return List.of("duty", "force, " + units.unit(Quantity.FORCE).symbol(), "limit that governs", "pose");
+        return List.of("duty", shown.heading("force", Quantity.FORCE), "limit that governs", "pose");
     }
 
     private List<String> row(String duty, DigForce force) {
         return List.of(
-                duty, TextTable.number(units.of(force.force(), Quantity.FORCE)), force.limit(), pose(force.at()));
-    }
-
-    private String pose(double[] at) {
-        StringBuilder text = new StringBuilder();
-        for (int c = 0; c < at.length; c++) {
-            text.append(c == 0 ? "" : ", ").append(cylinders.get(c)).append(' ').append(TextTable.number(at[c]));
-        }
-        return text.toString();
+                duty, shown.cell(force.force(), Quantity.FORCE), force.limit(), Shown.pose(cylinders, force.at()));
     }
 
     /** Rated forces and what the sweep met, as text, without the cautions. */
@@ -144,7 +137,10 @@ public final class DigReport {
                 LinkagePicture.across(units),
                 LinkagePicture.up(units),
                 Bands.byValue(
-                        lengths(sweep, "tip_x"), lengths(sweep, "tip_y"), converted(sweep, duty, Quantity.FORCE), unit),
+                        lengths(sweep, "tip_x"),
+                        lengths(sweep, "tip_y"),
+                        shown.all(sweep.column(sweep.column(duty)), Quantity.FORCE),
+                        unit),
                 true,
                 List.of());
     }
@@ -170,15 +166,7 @@ public final class DigReport {
     }
 
     private double[] lengths(Table sweep, String name) {
-        return converted(sweep, name, Quantity.LENGTH);
-    }
-
-    private double[] converted(Table sweep, String name, Quantity quantity) {
-        double[] values = sweep.column(sweep.column(name));
-        for (int i = 0; i < values.length; i++) {
-            values[i] = units.of(values[i], quantity);
-        }
-        return values;
+        return shown.all(sweep.column(sweep.column(name)), Quantity.LENGTH);
     }
 
     /** The section of the report page. */

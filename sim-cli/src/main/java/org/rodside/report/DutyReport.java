@@ -23,12 +23,14 @@ public final class DutyReport {
     private final Table duty;
     private final HistoryAccumulator met;
     private final UnitSystem units;
+    private final Shown shown;
 
     public DutyReport(Front front, Table duty, HistoryAccumulator met, UnitSystem units) {
         this.front = front;
         this.duty = duty;
         this.met = met;
         this.units = units;
+        shown = new Shown(units);
     }
 
     private HistoryReport history() {
@@ -101,17 +103,11 @@ public final class DutyReport {
                 "time, s",
                 "force, " + unit,
                 List.of(
-                        Series.line("forward", Palette.category(0), time, forces(first)),
-                        Series.line("up", Palette.category(1), time, forces(first + 1))),
+                        Series.line(
+                                "forward", Palette.category(0), time, shown.all(duty.column(first), Quantity.FORCE)),
+                        Series.line(
+                                "up", Palette.category(1), time, shown.all(duty.column(first + 1), Quantity.FORCE))),
                 false,
                 List.of());
-    }
-
-    private double[] forces(int column) {
-        double[] values = duty.column(column);
-        for (int i = 0; i < values.length; i++) {
-            values[i] = units.of(values[i], Quantity.FORCE);
-        }
-        return values;
     }
 }

@@ -9,7 +9,6 @@ import org.rodside.chart.Mark;
 import org.rodside.chart.Palette;
 import org.rodside.chart.Plot;
 import org.rodside.chart.Series;
-import org.rodside.model.Cylinder;
 import org.rodside.study.Front;
 import org.rodside.study.FrontSolver;
 import org.rodside.study.RangeAnswer;
@@ -26,13 +25,15 @@ public final class EnvelopeReport {
     private final Front front;
     private final RangeAnswer answer;
     private final UnitSystem units;
+    private final Shown shown;
     private final List<String> cylinders;
 
     public EnvelopeReport(Front front, RangeAnswer answer, UnitSystem units) {
         this.front = front;
         this.answer = answer;
         this.units = units;
-        cylinders = front.linkage().cylinders().stream().map(Cylinder::name).toList();
+        shown = new Shown(units);
+        cylinders = Shown.cylinders(front.linkage());
     }
 
     private static Map<String, String> meanings() {
@@ -84,10 +85,8 @@ public final class EnvelopeReport {
     private List<List<String>> rows() {
         List<List<String>> rows = new ArrayList<>();
         answer.dimensions()
-                .forEach((name, value) -> rows.add(List.of(
-                        name.replace('_', ' '),
-                        TextTable.number(units.of(value, Quantity.LENGTH)),
-                        MEANINGS.get(name))));
+                .forEach((name, value) -> rows.add(
+                        List.of(name.replace('_', ' '), shown.cell(value, Quantity.LENGTH), MEANINGS.get(name))));
         return rows;
     }
 
@@ -113,7 +112,8 @@ public final class EnvelopeReport {
         LinkagePicture picture = new LinkagePicture(PoseDrawing.of(solver.pose()), units);
         series.addAll(picture.series());
         for (double[][] ring : answer.outline()) {
-            series.add(Series.line("", Palette.category(1), converted(ring[0]), converted(ring[1])));
+            series.add(Series.line(
+                    "", Palette.category(1), shown.all(ring[0], Quantity.LENGTH), shown.all(ring[1], Quantity.LENGTH)));
         }
         return new Plot(
                 front.linkage().name() + ": working range of the tip",
@@ -137,14 +137,6 @@ public final class EnvelopeReport {
             }
         }
         return marks;
-    }
-
-    private double[] converted(double[] lengths) {
-        double[] values = new double[lengths.length];
-        for (int i = 0; i < values.length; i++) {
-            values[i] = units.of(lengths[i], Quantity.LENGTH);
-        }
-        return values;
     }
 
     /** The section of the report page. */

@@ -18,12 +18,14 @@ public final class HistoryReport {
     private final HistoryAccumulator history;
     private final HistoryQuestion question;
     private final UnitSystem units;
+    private final Shown shown;
     private final Mechanism mechanism;
 
     public HistoryReport(HistoryAccumulator history, HistoryQuestion question, UnitSystem units) {
         this.history = history;
         this.question = question;
         this.units = units;
+        shown = new Shown(units);
         mechanism = history.mechanism();
     }
 
@@ -105,7 +107,7 @@ public final class HistoryReport {
                 .append(
                         question.measured()
                                 ? "; tip force fitted to the measured pressures, largest residual "
-                                        + shown(history.fit(), Quantity.FORCE)
+                                        + shown.text(history.fit(), Quantity.FORCE)
                                 : "")
                 .append("\n\nPeaks of the cylinders\n");
         text.append(TextTable.of(headings(), rows()))
@@ -117,11 +119,11 @@ public final class HistoryReport {
 
     private void totals(StringBuilder text) {
         text.append("\nLargest flow into all cylinders ")
-                .append(shown(history.flow(), Quantity.FLOW))
+                .append(shown.text(history.flow(), Quantity.FLOW))
                 .append(" at ")
                 .append(TextTable.number(history.flowTime()))
                 .append(" s; largest power given ")
-                .append(shown(history.power(), Quantity.POWER))
+                .append(shown.text(history.power(), Quantity.POWER))
                 .append(" at ")
                 .append(TextTable.number(history.powerTime()))
                 .append(" s\n");
@@ -137,15 +139,10 @@ public final class HistoryReport {
                         .append(" s\n"));
     }
 
-    private String shown(double si, Quantity quantity) {
-        return TextTable.number(units.of(si, quantity)) + " "
-                + units.unit(quantity).symbol().replace('_', '/');
-    }
-
     private List<String> headings() {
         List<String> headings = new ArrayList<>(List.of("cylinder"));
         for (Peak peak : Peak.values()) {
-            headings.add(word(peak) + ", " + units.unit(quantity(peak)).symbol().replace('_', '/'));
+            headings.add(shown.heading(word(peak), quantity(peak)));
             headings.add("at s");
         }
         return headings;
@@ -156,7 +153,7 @@ public final class HistoryReport {
         for (int c = 0; c < mechanism.cylinders(); c++) {
             List<String> row = new ArrayList<>(List.of(mechanism.cylinderName(c)));
             for (Peak peak : Peak.values()) {
-                row.add(TextTable.number(units.of(history.peak(c, peak), quantity(peak))));
+                row.add(shown.cell(history.peak(c, peak), quantity(peak)));
                 row.add(TextTable.number(history.peakTime(c, peak)));
             }
             rows.add(row);
@@ -183,9 +180,8 @@ public final class HistoryReport {
                 .forEach(b -> rows.add(List.of(
                         mechanism.pinName(mechanism.bearingPin(b)),
                         mechanism.bodyName(mechanism.bearingBody(b)),
-                        TextTable.number(units.of(history.bearing(b), Quantity.FORCE)),
+                        shown.cell(history.bearing(b), Quantity.FORCE),
                         TextTable.number(history.bearingTime(b)))));
-        return TextTable.of(
-                List.of("pin", "link", "total, " + units.unit(Quantity.FORCE).symbol(), "at s"), rows);
+        return TextTable.of(List.of("pin", "link", shown.heading("total", Quantity.FORCE), "at s"), rows);
     }
 }

@@ -10,7 +10,6 @@ import org.rodside.chart.Bands;
 import org.rodside.chart.Mark;
 import org.rodside.chart.Plot;
 import org.rodside.chart.Series;
-import org.rodside.model.Cylinder;
 import org.rodside.study.Front;
 import org.rodside.study.FrontSolver;
 import org.rodside.study.LiftPoint;
@@ -30,6 +29,7 @@ public final class LiftReport {
     private final LiftQuestion question;
     private final List<LiftPoint> points;
     private final UnitSystem units;
+    private final Shown shown;
     private final List<String> cylinders;
 
     public LiftReport(Front front, LiftQuestion question, List<LiftPoint> points, UnitSystem units) {
@@ -37,7 +37,8 @@ public final class LiftReport {
         this.question = question;
         this.points = List.copyOf(points);
         this.units = units;
-        cylinders = front.linkage().cylinders().stream().map(Cylinder::name).toList();
+        shown = new Shown(units);
+        cylinders = Shown.cylinders(front.linkage());
     }
 
     /** All points as a table. */
@@ -117,7 +118,7 @@ public final class LiftReport {
 
     private List<String> headings() {
         List<String> headings = new ArrayList<>(List.of("height"));
-        radii().forEach(radius -> headings.add(TextTable.number(units.of(radius, Quantity.LENGTH))));
+        radii().forEach(radius -> headings.add(shown.cell(radius, Quantity.LENGTH)));
         return headings;
     }
 
@@ -132,7 +133,7 @@ public final class LiftReport {
         points.forEach(point -> heights.add(point.height()));
         List<List<String>> rows = new ArrayList<>();
         for (double height : heights.descendingSet()) {
-            List<String> row = new ArrayList<>(List.of(TextTable.number(units.of(height, Quantity.LENGTH))));
+            List<String> row = new ArrayList<>(List.of(shown.cell(height, Quantity.LENGTH)));
             for (double radius : radii()) {
                 row.add(cell(radius, height));
             }

@@ -8,7 +8,6 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import org.rodside.kinematics.Mechanism;
-import org.rodside.model.Cylinder;
 import org.rodside.study.Front;
 import org.rodside.study.LoadCase;
 import org.rodside.study.LoadsAnswer;
@@ -24,6 +23,7 @@ public final class LoadsReport {
     private final Mechanism mechanism;
     private final LoadsAnswer answer;
     private final UnitSystem units;
+    private final Shown shown;
     private final List<String> cylinders;
     private final List<String> cases;
 
@@ -31,8 +31,9 @@ public final class LoadsReport {
         this.front = front;
         this.answer = answer;
         this.units = units;
+        shown = new Shown(units);
         mechanism = front.mechanism();
-        cylinders = front.linkage().cylinders().stream().map(Cylinder::name).toList();
+        cylinders = Shown.cylinders(front.linkage());
         cases = answer.cases().stream().map(LoadCase::name).toList();
     }
 
@@ -181,23 +182,15 @@ public final class LoadsReport {
         return text.toString();
     }
 
-    private String heading(String name, Quantity quantity) {
-        return name + ", " + units.unit(quantity).symbol();
-    }
-
-    private String cell(double si, Quantity quantity) {
-        return TextTable.number(units.of(si, quantity));
-    }
-
     private List<String> cylinderHeadings() {
         return List.of(
                 "cylinder",
                 "worst",
                 "case",
-                heading("total", Quantity.FORCE),
-                heading("each", Quantity.FORCE),
-                heading("cap side", Quantity.PRESSURE),
-                heading("rod side", Quantity.PRESSURE),
+                shown.heading("total", Quantity.FORCE),
+                shown.heading("each", Quantity.FORCE),
+                shown.heading("cap side", Quantity.PRESSURE),
+                shown.heading("rod side", Quantity.PRESSURE),
                 "relief margin",
                 "buckling factor");
     }
@@ -232,17 +225,21 @@ public final class LoadsReport {
                 cylinders.get(load.cylinder()),
                 load.sense().name().toLowerCase(Locale.ROOT),
                 load.loadCase(),
-                cell(load.total(), Quantity.FORCE),
-                cell(load.each(), Quantity.FORCE),
-                cell(load.cap(), Quantity.PRESSURE),
-                cell(load.rod(), Quantity.PRESSURE),
+                shown.cell(load.total(), Quantity.FORCE),
+                shown.cell(load.each(), Quantity.FORCE),
+                shown.cell(load.cap(), Quantity.PRESSURE),
+                shown.cell(load.rod(), Quantity.PRESSURE),
                 TextTable.number(load.reliefMargin()),
                 TextTable.number(load.bucklingFactor()));
     }
 
     private List<String> bearingHeadings() {
         return List.of(
-                "pin", "link", "case", heading("total", Quantity.FORCE), heading("angle in link", Quantity.ANGLE));
+                "pin",
+                "link",
+                "case",
+                shown.heading("total", Quantity.FORCE),
+                shown.heading("angle in link", Quantity.ANGLE));
     }
 
     private List<List<String>> worstBearings() {
@@ -257,16 +254,16 @@ public final class LoadsReport {
                         mechanism.pinName(mechanism.bearingPin(load.bearing())),
                         mechanism.bodyName(mechanism.bearingBody(load.bearing())),
                         load.loadCase(),
-                        cell(load.total(), Quantity.FORCE),
-                        cell(Math.atan2(load.y(), load.x()), Quantity.ANGLE))));
+                        shown.cell(load.total(), Quantity.FORCE),
+                        shown.cell(Math.atan2(load.y(), load.x()), Quantity.ANGLE))));
         return rows;
     }
 
     private List<String> intensifiedHeadings() {
         return List.of(
                 "cylinder",
-                heading("rod side", Quantity.PRESSURE),
-                heading("relief", Quantity.PRESSURE),
+                shown.heading("rod side", Quantity.PRESSURE),
+                shown.heading("relief", Quantity.PRESSURE),
                 "relief margin");
     }
 
@@ -275,8 +272,8 @@ public final class LoadsReport {
         answer.intensified()
                 .forEach(rod -> rows.add(List.of(
                         cylinders.get(rod.cylinder()),
-                        cell(rod.rod(), Quantity.PRESSURE),
-                        cell(rod.relief(), Quantity.PRESSURE),
+                        shown.cell(rod.rod(), Quantity.PRESSURE),
+                        shown.cell(rod.relief(), Quantity.PRESSURE),
                         TextTable.number(rod.relief() / rod.rod()))));
         return rows;
     }

@@ -21,6 +21,7 @@ public final class PoseReport {
 
     private final PoseAnswer answer;
     private final UnitSystem units;
+    private final Shown shown;
     private final Mechanism mechanism;
     private final PoseBuffer pose;
     private final Linkage linkage;
@@ -28,6 +29,7 @@ public final class PoseReport {
     public PoseReport(PoseAnswer answer, UnitSystem units) {
         this.answer = answer;
         this.units = units;
+        shown = new Shown(units);
         pose = answer.pose();
         mechanism = pose.mechanism();
         linkage = mechanism.linkage();
@@ -169,30 +171,17 @@ public final class PoseReport {
         text.append("\nTool points\n").append(placeTable(points()));
         answer.ground()
                 .ifPresent(ground -> text.append("\nGround on machine: ")
-                        .append(shown(ground.normal(), Quantity.FORCE))
+                        .append(shown.text(ground.normal(), Quantity.FORCE))
                         .append(" up, ")
-                        .append(shown(ground.horizontal(), Quantity.FORCE))
+                        .append(shown.text(ground.horizontal(), Quantity.FORCE))
                         .append(" forward, through x = ")
-                        .append(shown(ground.resultantX(), Quantity.LENGTH))
+                        .append(shown.text(ground.resultantX(), Quantity.LENGTH))
                         .append('\n'));
         if (!answer.polygon().isEmpty()) {
             text.append("\nLargest force on the ground with every cylinder holding\n")
                     .append(polygonTable());
         }
         return text.append('\n').append(Cautions.text()).toString();
-    }
-
-    private String shown(double si, Quantity quantity) {
-        return TextTable.number(units.of(si, quantity)) + " "
-                + units.unit(quantity).symbol();
-    }
-
-    private String cell(double si, Quantity quantity) {
-        return TextTable.number(units.of(si, quantity));
-    }
-
-    private String heading(String name, Quantity quantity) {
-        return name + ", " + units.unit(quantity).symbol();
     }
 
     private String cylinderTable() {
@@ -203,21 +192,21 @@ public final class PoseReport {
             rows.add(List.of(
                     cylinder.name(),
                     TextTable.number(answer.fractions()[c]),
-                    cell(pose.length(c), Quantity.LENGTH),
-                    cell(force, Quantity.FORCE),
-                    cell(force * cylinder.harderShare(), Quantity.FORCE),
-                    cell(answer.pressures().get(c).cap(), Quantity.PRESSURE),
-                    cell(answer.pressures().get(c).rod(), Quantity.PRESSURE)));
+                    shown.cell(pose.length(c), Quantity.LENGTH),
+                    shown.cell(force, Quantity.FORCE),
+                    shown.cell(force * cylinder.harderShare(), Quantity.FORCE),
+                    shown.cell(answer.pressures().get(c).cap(), Quantity.PRESSURE),
+                    shown.cell(answer.pressures().get(c).rod(), Quantity.PRESSURE)));
         }
         return TextTable.of(
                 List.of(
                         "cylinder",
                         "fraction",
-                        heading("length", Quantity.LENGTH),
-                        heading("force", Quantity.FORCE),
-                        heading("each", Quantity.FORCE),
-                        heading("cap side", Quantity.PRESSURE),
-                        heading("rod side", Quantity.PRESSURE)),
+                        shown.heading("length", Quantity.LENGTH),
+                        shown.heading("force", Quantity.FORCE),
+                        shown.heading("each", Quantity.FORCE),
+                        shown.heading("cap side", Quantity.PRESSURE),
+                        shown.heading("rod side", Quantity.PRESSURE)),
                 rows);
     }
 
@@ -229,17 +218,17 @@ public final class PoseReport {
             rows.add(List.of(
                     mechanism.pinName(mechanism.bearingPin(b)),
                     mechanism.bodyName(mechanism.bearingBody(b)),
-                    cell(Math.hypot(x, y), Quantity.FORCE),
-                    cell(x, Quantity.FORCE),
-                    cell(y, Quantity.FORCE)));
+                    shown.cell(Math.hypot(x, y), Quantity.FORCE),
+                    shown.cell(x, Quantity.FORCE),
+                    shown.cell(y, Quantity.FORCE)));
         }
         return TextTable.of(
                 List.of(
                         "pin",
                         "link",
-                        heading("total", Quantity.FORCE),
-                        heading("x", Quantity.FORCE),
-                        heading("y", Quantity.FORCE)),
+                        shown.heading("total", Quantity.FORCE),
+                        shown.heading("x", Quantity.FORCE),
+                        shown.heading("y", Quantity.FORCE)),
                 rows);
     }
 
@@ -250,16 +239,20 @@ public final class PoseReport {
             ((Map<?, ?>) at).values().forEach(value -> row.add(TextTable.number((Double) value)));
             rows.add(row);
         });
-        return TextTable.of(List.of("point", heading("x", Quantity.LENGTH), heading("y", Quantity.LENGTH)), rows);
+        return TextTable.of(
+                List.of("point", shown.heading("x", Quantity.LENGTH), shown.heading("y", Quantity.LENGTH)), rows);
     }
 
     private String polygonTable() {
         List<List<String>> rows = new ArrayList<>();
         answer.polygon()
                 .forEach(side -> rows.add(List.of(
-                        cell(side.direction(), Quantity.ANGLE), cell(side.force(), Quantity.FORCE), side.limit())));
+                        shown.cell(side.direction(), Quantity.ANGLE),
+                        shown.cell(side.force(), Quantity.FORCE),
+                        side.limit())));
         return TextTable.of(
-                List.of(heading("direction", Quantity.ANGLE), heading("force", Quantity.FORCE), "limit"), rows);
+                List.of(shown.heading("direction", Quantity.ANGLE), shown.heading("force", Quantity.FORCE), "limit"),
+                rows);
     }
 
     /** The pose as a picture. */

@@ -23,18 +23,19 @@ public final class SizeReport {
     private final SizeQuestion question;
     private final List<SizeRow> rows;
     private final UnitSystem units;
+    private final Shown shown;
 
     public SizeReport(Front front, SizeQuestion question, List<SizeRow> rows, UnitSystem units) {
         this.front = front;
         this.question = question;
         this.rows = List.copyOf(rows);
         this.units = units;
+        shown = new Shown(units);
     }
 
     /** All rows as a table. */
     public Table table() {
-        List<String> names =
-                front.linkage().cylinders().stream().map(Cylinder::name).toList();
+        List<String> names = Shown.cylinders(front.linkage());
         Table table = new Table(List.of(
                 Column.words("cylinder", names),
                 Column.of("bore", Quantity.LENGTH),
@@ -122,34 +123,29 @@ public final class SizeReport {
     public String text() {
         return "Cylinder sizes for the worst loads (buckling factor at least " + TextTable.number(question.factor())
                 + ", pressure at most " + pressureAsked() + "; flows at "
-                + TextTable.number(units.of(question.speed(), Quantity.SPEED)) + " "
-                + units.unit(Quantity.SPEED).symbol().replace("_", "/") + ")\n" + TextTable.of(headings(), shownRows())
+                + shown.text(question.speed(), Quantity.SPEED) + ")\n" + TextTable.of(headings(), shownRows())
                 + "Loads are those of the machine as drawn: a larger cylinder also makes larger tool forces.\n";
     }
 
     private String pressureAsked() {
         return question.pressure().isEmpty()
                 ? "each cylinder's working pressure"
-                : TextTable.number(units.of(question.pressure().getAsDouble(), Quantity.PRESSURE)) + " "
-                        + units.unit(Quantity.PRESSURE).symbol();
+                : shown.text(question.pressure().getAsDouble(), Quantity.PRESSURE);
     }
 
     private List<String> headings() {
-        String pressure = units.unit(Quantity.PRESSURE).symbol();
-        String length = units.unit(Quantity.LENGTH).symbol();
-        String flow = units.unit(Quantity.FLOW).symbol().replace("_", "/");
         return List.of(
                 "cylinder",
                 "size",
-                "bore, " + length,
-                "rod, " + length,
-                "push, " + pressure,
-                "pull, " + pressure,
+                shown.heading("bore", Quantity.LENGTH),
+                shown.heading("rod", Quantity.LENGTH),
+                shown.heading("push", Quantity.PRESSURE),
+                shown.heading("pull", Quantity.PRESSURE),
                 "buckling factor",
                 "loaded factor",
-                "mass, " + units.unit(Quantity.MASS).symbol(),
-                "push, " + flow,
-                "pull, " + flow,
+                shown.heading("mass", Quantity.MASS),
+                shown.heading("push", Quantity.FLOW),
+                shown.heading("pull", Quantity.FLOW),
                 "carries");
     }
 
@@ -174,15 +170,15 @@ public final class SizeReport {
                 row.cylinder().name()
                         + (row.cylinder().count() > 1 ? " ×" + row.cylinder().count() : ""),
                 row.present() ? "present" : "",
-                TextTable.number(units.of(row.cylinder().bore(), Quantity.LENGTH)),
-                TextTable.number(units.of(row.cylinder().rod(), Quantity.LENGTH)),
-                TextTable.number(units.of(row.pushPressure(), Quantity.PRESSURE)),
-                TextTable.number(units.of(row.pullPressure(), Quantity.PRESSURE)),
+                shown.cell(row.cylinder().bore(), Quantity.LENGTH),
+                shown.cell(row.cylinder().rod(), Quantity.LENGTH),
+                shown.cell(row.pushPressure(), Quantity.PRESSURE),
+                shown.cell(row.pullPressure(), Quantity.PRESSURE),
                 TextTable.number(row.bucklingFactor()),
                 TextTable.number(row.loadedFactor()),
-                TextTable.number(units.of(row.mass(), Quantity.MASS)),
-                TextTable.number(units.of(row.pushFlow(), Quantity.FLOW)),
-                TextTable.number(units.of(row.pullFlow(), Quantity.FLOW)),
+                shown.cell(row.mass(), Quantity.MASS),
+                shown.cell(row.pushFlow(), Quantity.FLOW),
+                shown.cell(row.pullFlow(), Quantity.FLOW),
                 row.carries() ? "yes" : "no");
     }
 
