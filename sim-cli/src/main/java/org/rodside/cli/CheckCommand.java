@@ -2,7 +2,6 @@ package org.rodside.cli;
 
 import java.util.Optional;
 import java.util.concurrent.Callable;
-import org.rodside.io.JsonWriter;
 import org.rodside.io.LoadText;
 import org.rodside.report.CheckReport;
 import org.rodside.study.Closure;
@@ -45,7 +44,7 @@ final class CheckCommand implements Callable<Integer> {
         int asked = LoadText.count("--steps", Optional.ofNullable(steps), 1000);
         ClosureAnswer answer = Closure.of(front, asked == 0 ? Closure.usualSteps(front) : DigSweep.steps(front, asked));
         CheckReport report = new CheckReport(front, answer, common.units());
-        common.out().println(common.json() ? JsonWriter.text(report.json()) : report.text());
+        common.tell(report::json, report::text);
         return ExitStatus.DONE;
     }
 }

@@ -7,8 +7,13 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.function.Supplier;
+import org.rodside.io.JsonWriter;
 import org.rodside.model.InputException;
+import org.rodside.report.Cautions;
+import org.rodside.study.Front;
 import org.rodside.units.UnitSystem;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
@@ -87,6 +92,16 @@ final class CommonOptions {
     /** Standard output: the summary. */
     PrintWriter out() {
         return spec.commandLine().getOut();
+    }
+
+    /** Prints an answer: one JSON object where asked for, else text. */
+    void tell(Supplier<Map<String, ?>> json, Supplier<String> text) {
+        out().println(this.json ? JsonWriter.text(json.get()) : text.get());
+    }
+
+    /** Prints the answer of a study: JSON, or the name of the linkage, the text and the cautions. */
+    void tell(Front front, Supplier<Map<String, ?>> json, Supplier<String> text) {
+        tell(json, () -> front.linkage().name() + "\n\n" + text.get() + "\n" + Cautions.text());
     }
 
     /** A note to the user on standard error. */

@@ -3,9 +3,7 @@ package org.rodside.cli;
 import java.nio.file.Path;
 import java.util.Optional;
 import java.util.concurrent.Callable;
-import org.rodside.io.JsonWriter;
 import org.rodside.io.LoadText;
-import org.rodside.report.Cautions;
 import org.rodside.report.DigReport;
 import org.rodside.study.DigForce;
 import org.rodside.study.DigSummary;
@@ -68,8 +66,7 @@ final class DigCommand implements Callable<Integer> {
         Digging digging = new Digging(front, edge);
         DigForce curl = digging.curlAt(fractions, ideal);
         Optional<DigForce> crowd = digging.crowdAt(fractions, ideal);
-        common.out()
-                .println(common.json() ? JsonWriter.text(report.poseJson(curl, crowd)) : report.poseText(curl, crowd));
+        common.tell(() -> report.poseJson(curl, crowd), () -> report.poseText(curl, crowd));
         return ExitStatus.DONE;
     }
 
@@ -78,18 +75,16 @@ final class DigCommand implements Callable<Integer> {
         Digging digging = new Digging(front, edge);
         DigForce curl = digging.ratedCurl();
         Optional<DigForce> crowd = digging.ratedCrowd();
-        DigSummary summary;
-        try (Progress progress = common.progress("digging forces")) {
-            summary = sweep.summary(common.threads(), progress);
-        }
+        DigSummary summary = summary(sweep);
         common.folder(file.path()).ifPresent(folder -> files(front, report, sweep, folder));
-        common.out()
-                .println(
-                        common.json()
-                                ? JsonWriter.text(report.json(curl, crowd, summary))
-                                : front.linkage().name() + "\n\n" + report.text(curl, crowd, summary) + "\n"
-                                        + Cautions.text());
+        common.tell(front, () -> report.json(curl, crowd, summary), () -> report.text(curl, crowd, summary));
         return ExitStatus.DONE;
+    }
+
+    private DigSummary summary(DigSweep sweep) {
+        try (Progress progress = common.progress("digging forces")) {
+            return sweep.summary(common.threads(), progress);
+        }
     }
 
     private int countSteps() {

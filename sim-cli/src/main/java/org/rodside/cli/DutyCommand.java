@@ -5,9 +5,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.concurrent.Callable;
 import org.rodside.io.DutyPassReader;
-import org.rodside.io.JsonWriter;
 import org.rodside.io.LoadText;
-import org.rodside.report.Cautions;
 import org.rodside.report.DutyReport;
 import org.rodside.study.DutyMaker;
 import org.rodside.study.Front;
@@ -49,11 +47,7 @@ final class DutyCommand implements Callable<Integer> {
         DutyReport report = new DutyReport(
                 front, duty, DutyMaker.judge(front, duty, flow.orElse(Double.POSITIVE_INFINITY)), common.units());
         common.folder(pass).ifPresent(report::files);
-        common.out()
-                .println(
-                        common.json()
-                                ? JsonWriter.text(report.json())
-                                : front.linkage().name() + "\n\n" + report.text() + "\n" + Cautions.text());
+        common.tell(front, report::json, report::text);
         return ExitStatus.DONE;
     }
 }

@@ -1,8 +1,6 @@
 package org.rodside.cli;
 
 import java.util.concurrent.Callable;
-import org.rodside.io.JsonWriter;
-import org.rodside.report.Cautions;
 import org.rodside.report.EnvelopeReport;
 import org.rodside.study.Front;
 import org.rodside.study.WorkingRange;
@@ -28,11 +26,7 @@ final class EnvelopeCommand implements Callable<Integer> {
         Front front = Front.of(file.read(common));
         EnvelopeReport report = new EnvelopeReport(front, WorkingRange.of(front), common.units());
         common.folder(file.path()).ifPresent(report::files);
-        common.out()
-                .println(
-                        common.json()
-                                ? JsonWriter.text(report.json())
-                                : front.linkage().name() + "\n\n" + report.text() + "\n" + Cautions.text());
+        common.tell(front, report::json, report::text);
         return ExitStatus.DONE;
     }
 }

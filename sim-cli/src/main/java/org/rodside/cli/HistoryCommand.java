@@ -6,9 +6,7 @@ import java.util.OptionalDouble;
 import java.util.concurrent.Callable;
 import org.rodside.io.CsvWriter;
 import org.rodside.io.DutySource;
-import org.rodside.io.JsonWriter;
 import org.rodside.io.LoadText;
-import org.rodside.report.Cautions;
 import org.rodside.report.HistoryReport;
 import org.rodside.study.Front;
 import org.rodside.study.History;
@@ -69,10 +67,8 @@ final class HistoryCommand implements Callable<Integer> {
                     new HistoryQuestion(source.measured(), atRest, flow.orElse(Double.POSITIVE_INFINITY));
             HistoryAccumulator met = run(source, new History(front, question));
             HistoryReport report = new HistoryReport(met, question, common.units());
-            if (common.json()) {
-                common.out().println(JsonWriter.text(report.json()));
-            } else if (!"-".equals(to)) {
-                common.out().println(front.linkage().name() + "\n\n" + report.text() + "\n" + Cautions.text());
+            if (common.json() || !"-".equals(to)) {
+                common.tell(front, report::json, report::text);
             }
         }
         return ExitStatus.DONE;

@@ -4,10 +4,8 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.concurrent.Callable;
-import org.rodside.io.JsonWriter;
 import org.rodside.io.LoadText;
 import org.rodside.io.PoseText;
-import org.rodside.report.Cautions;
 import org.rodside.report.LiftReport;
 import org.rodside.study.Front;
 import org.rodside.study.LiftCapacity;
@@ -82,11 +80,7 @@ final class LiftCommand implements Callable<Integer> {
         }
         LiftReport report = new LiftReport(front, question, points, common.units());
         common.folder(file.path()).ifPresent(report::files);
-        common.out()
-                .println(
-                        common.json()
-                                ? JsonWriter.text(report.json())
-                                : front.linkage().name() + "\n\n" + report.text() + "\n" + Cautions.text());
+        common.tell(front, report::json, report::text);
         return ExitStatus.DONE;
     }
 

@@ -6,9 +6,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import org.rodside.io.CaseText;
-import org.rodside.io.JsonWriter;
 import org.rodside.model.InputException;
-import org.rodside.report.Cautions;
 import org.rodside.report.LoadsReport;
 import org.rodside.study.Front;
 import org.rodside.study.LoadCase;
@@ -44,11 +42,7 @@ final class LoadsCommand implements Callable<Integer> {
         }
         LoadsReport report = new LoadsReport(front, answer, common.units());
         common.folder(file.path()).ifPresent(report::files);
-        common.out()
-                .println(
-                        common.json()
-                                ? JsonWriter.text(report.json())
-                                : front.linkage().name() + "\n\n" + report.text() + "\n" + Cautions.text());
+        common.tell(front, report::json, report::text);
         return ExitStatus.DONE;
     }
 

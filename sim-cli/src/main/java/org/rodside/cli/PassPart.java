@@ -40,14 +40,14 @@ final class PassPart implements StudyPart {
         PassRun run = run(desk, duty);
         DutyReport report = new DutyReport(front, duty, run.met(), units);
         desk.folder().ifPresent(folder -> {
-            CycleTables tables = new CycleTables(run.all());
+            CycleTables tables = new CycleTables(run.cycles());
             CsvWriter.write(folder.resolve("cycles.csv"), tables.cycleColumns(), units, tables::cycles);
             report.files(folder);
             report.section(desk.page());
         });
         Map<String, Object> json = new LinkedHashMap<>();
         json.put("history", report.json());
-        json.put("cycles", new CyclesReport(run.all()).json());
+        json.put("cycles", new CyclesReport(run.cycles()).json());
         return new Told(
                 json,
                 "A pass from " + desk.pass().getFileName() + "\n" + report.text() + "\n"

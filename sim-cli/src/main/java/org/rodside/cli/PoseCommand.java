@@ -2,7 +2,6 @@ package org.rodside.cli;
 
 import java.util.Optional;
 import java.util.concurrent.Callable;
-import org.rodside.io.JsonWriter;
 import org.rodside.io.LoadText;
 import org.rodside.io.PoseText;
 import org.rodside.model.InputException;
@@ -69,7 +68,7 @@ final class PoseCommand implements Callable<Integer> {
                 LoadText.count("--directions", Optional.ofNullable(directions), 3600));
         PoseReport report = new PoseReport(PoseStudy.answer(front, question), common.units());
         common.folder(file.path()).ifPresent(report::files);
-        common.out().println(common.json() ? JsonWriter.text(report.json()) : report.text());
+        common.tell(report::json, report::text);
         return ExitStatus.DONE;
     }
 }

@@ -4,9 +4,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.concurrent.Callable;
-import org.rodside.io.JsonWriter;
 import org.rodside.io.LoadText;
-import org.rodside.report.Cautions;
 import org.rodside.report.SizeReport;
 import org.rodside.study.Front;
 import org.rodside.study.LoadsAnswer;
@@ -84,11 +82,7 @@ final class SizeCommand implements Callable<Integer> {
         }
         SizeReport report = new SizeReport(front, question, rows, common.units());
         common.folder(file.path()).ifPresent(report::files);
-        common.out()
-                .println(
-                        common.json()
-                                ? JsonWriter.text(report.json())
-                                : front.linkage().name() + "\n\n" + report.text() + "\n" + Cautions.text());
+        common.tell(front, report::json, report::text);
         return ExitStatus.DONE;
     }
 

@@ -7,7 +7,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.Callable;
-import org.rodside.io.JsonWriter;
 import org.rodside.io.WholeFile;
 import org.rodside.model.InputException;
 import org.rodside.model.Linkage;
@@ -76,7 +75,7 @@ final class StudyCommand implements Callable<Integer> {
         told.put("cautions", Cautions.estimates());
         folder.ifPresent(
                 f -> WholeFile.write(f.resolve("report.html"), page.html().getBytes(StandardCharsets.UTF_8)));
-        common.out().println(common.json() ? JsonWriter.text(told) : summary(linkage, folder));
+        common.tell(() -> told, () -> summary(linkage, folder));
         return ExitStatus.DONE;
     }
 

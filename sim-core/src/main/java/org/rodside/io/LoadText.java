@@ -81,10 +81,15 @@ public final class LoadText {
         return unit.toSi(value);
     }
 
+    /** Whether a text is a plain decimal number, without white space around it. */
+    static boolean isNumber(String text) {
+        return NUMBER.matcher(text).matches();
+    }
+
     /** A plain number. */
     public static double number(String option, String text, String unit) {
         String trimmed = text.strip();
-        if (!NUMBER.matcher(trimmed).matches() || !(Math.abs(Double.parseDouble(trimmed)) <= ABSURD)) {
+        if (!isNumber(trimmed) || !(Math.abs(Double.parseDouble(trimmed)) <= ABSURD)) {
             throw new InputException(
                     option + ": a number" + (unit.isEmpty() ? "" : " in " + unit) + " is wanted, found '" + text + "'");
         }

@@ -13,9 +13,6 @@ import org.rodside.model.Tool;
 /** Reads a pose as typed on the command line, {@code boom=0.4,stick=0.5,bucket=0.3}: fractions of stroke. */
 public final class PoseText {
 
-    /** A plain decimal number; {@code Double.parseDouble} alone would also take {@code NaN}, {@code 0x1p3}, {@code 1d}. */
-    private static final Pattern NUMBER = Pattern.compile("[+-]?(\\d+\\.?\\d*|\\.\\d+)([eE][+-]?\\d+)?");
-
     private final String option;
     private final List<String> names;
     private final double[] fractions;
@@ -97,7 +94,7 @@ public final class PoseText {
 
     /** One fraction of stroke, 0 retracted to 1 extended; no unit. */
     public static double fraction(String option, String text) {
-        double fraction = NUMBER.matcher(text.strip()).matches() ? Double.parseDouble(text.strip()) : Double.NaN;
+        double fraction = LoadText.isNumber(text.strip()) ? Double.parseDouble(text.strip()) : Double.NaN;
         if (!(fraction >= 0 && fraction <= 1)) {
             throw new InputException(option
                     + ": a fraction of stroke from 0 (retracted) to 1 (extended) is wanted, found '" + text + "'");
@@ -154,7 +151,7 @@ public final class PoseText {
             fault("cylinder " + name + " is given twice");
         }
         given[index] = true;
-        if (!NUMBER.matcher(value).matches()) {
+        if (!LoadText.isNumber(value)) {
             fault(name + ": '" + value + "' is not a number; a fraction of stroke from 0 to 1 is wanted");
             return;
         }

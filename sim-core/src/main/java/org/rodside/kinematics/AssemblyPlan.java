@@ -57,23 +57,14 @@ final class AssemblyPlan {
         return owners[pin] >= 0;
     }
 
-    private boolean isOn(int pin, int body) {
-        for (int other : mechanism.bodiesAt(pin)) {
-            if (other == body) {
-                return true;
-            }
-        }
-        return false;
-    }
-
     private boolean addCylinderStep() {
         for (int body = 1; body < placed.length; body++) {
             int pivot = placed[body] ? -1 : standingPin(body, -1);
             for (int c = 0; pivot >= 0 && c < used.length; c++) {
-                boolean rodOn = isOn(mechanism.rodPin(c), body);
+                boolean rodOn = mechanism.isOn(mechanism.rodPin(c), body);
                 int eye = rodOn ? mechanism.rodPin(c) : mechanism.capPin(c);
                 int anchor = rodOn ? mechanism.capPin(c) : mechanism.rodPin(c);
-                if (!used[c] && isOn(eye, body) && !stands(eye) && stands(anchor)) {
+                if (!used[c] && mechanism.isOn(eye, body) && !stands(eye) && stands(anchor)) {
                     steps.add(cylinderStep(c, body, pivot, anchor, eye));
                     used[c] = true;
                     take(body);
@@ -127,7 +118,11 @@ final class AssemblyPlan {
         for (int joint : mechanism.pinsOf(first)) {
             int firstPin = standingPin(first, joint);
             int secondPin = standingPin(second, joint);
-            if (!stands(joint) && isOn(joint, second) && firstPin >= 0 && secondPin >= 0 && firstPin != secondPin) {
+            if (!stands(joint)
+                    && mechanism.isOn(joint, second)
+                    && firstPin >= 0
+                    && secondPin >= 0
+                    && firstPin != secondPin) {
                 steps.add(pairStep(first, second, firstPin, secondPin, joint));
                 take(first);
                 take(second);

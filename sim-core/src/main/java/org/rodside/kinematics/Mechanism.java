@@ -238,6 +238,16 @@ public final class Mechanism {
         return bodiesOfPin[pin];
     }
 
+    /** Whether a pin is on a body. */
+    boolean isOn(int pin, int body) {
+        for (int other : bodiesOfPin[pin]) {
+            if (other == body) {
+                return true;
+            }
+        }
+        return false;
+    }
+
     /** True where every loop closes in closed form, one step after the other. */
     public boolean staged() {
         int placed = steps.stream()

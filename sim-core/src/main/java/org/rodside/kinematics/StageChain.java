@@ -64,7 +64,7 @@ public final class StageChain {
 
     private static boolean addCylinder(Mechanism mechanism, List<Group> groups, CylinderStep step) {
         for (int carrier : mechanism.bodiesAt(step.pivot())) {
-            if (carrier != step.body() && isOn(mechanism, step.anchor(), carrier)) {
+            if (carrier != step.body() && mechanism.isOn(step.anchor(), carrier)) {
                 groups.add(new Group(step.cylinder(), carrier, new ArrayList<>(List.of(step.body()))));
                 return true;
             }
@@ -77,8 +77,8 @@ public final class StageChain {
             Group group = groups.get(i);
             boolean firstMoves = onMember(mechanism, group, step.firstPin());
             boolean secondMoves = onMember(mechanism, group, step.secondPin());
-            boolean first = firstMoves || isOn(mechanism, step.firstPin(), group.carrier());
-            boolean second = secondMoves || isOn(mechanism, step.secondPin(), group.carrier());
+            boolean first = firstMoves || mechanism.isOn(step.firstPin(), group.carrier());
+            boolean second = secondMoves || mechanism.isOn(step.secondPin(), group.carrier());
             if (first && second && (firstMoves || secondMoves)) {
                 group.members().add(step.first());
                 group.members().add(step.second());
@@ -89,16 +89,7 @@ public final class StageChain {
     }
 
     private static boolean onMember(Mechanism mechanism, Group group, int pin) {
-        return group.members().stream().anyMatch(member -> isOn(mechanism, pin, member));
-    }
-
-    private static boolean isOn(Mechanism mechanism, int pin, int body) {
-        for (int other : mechanism.bodiesAt(pin)) {
-            if (other == body) {
-                return true;
-            }
-        }
-        return false;
+        return group.members().stream().anyMatch(member -> mechanism.isOn(pin, member));
     }
 
     private static Optional<StageChain> chain(List<Group> groups, int last) {

@@ -50,11 +50,4 @@ public final class ForceBuffer {
             bearingY[i] += factor * other.bearingY[i];
         }
     }
-
-    /** Takes over all forces of another buffer of the same mechanism. */
-    public void copyFrom(ForceBuffer other) {
-        System.arraycopy(other.cylinder, 0, cylinder, 0, cylinder.length);
-        System.arraycopy(other.bearingX, 0, bearingX, 0, bearingX.length);
-        System.arraycopy(other.bearingY, 0, bearingY, 0, bearingY.length);
-    }
 }

@@ -56,10 +56,10 @@ public final class BoxMaximum {
      * @param refinement how many times finer than usual the first grid is
      */
     public BoxMaximum(double[] fixed, int refinement) {
-        this(fixed, (usualGrid(fixed) - 1) * refinement + 1, true);
+        this((usualGrid(fixed) - 1) * refinement + 1, fixed);
     }
 
-    private BoxMaximum(double[] fixed, int gridPoints, boolean counted) {
+    private BoxMaximum(int gridPoints, double[] fixed) {
         List<Integer> moving = new ArrayList<>();
         for (int c = 0; c < fixed.length; c++) {
             if (Double.isNaN(fixed[c])) {
@@ -78,7 +78,7 @@ public final class BoxMaximum {
 
     /** A search whose first grid has a given number of points an axis. */
     static BoxMaximum withGrid(double[] fixed, int gridPoints) {
-        return new BoxMaximum(fixed, gridPoints, true);
+        return new BoxMaximum(gridPoints, fixed);
     }
 
     /** A search over all strokes of a front. */

@@ -99,16 +99,6 @@ public final class DigSolver {
         return limits;
     }
 
-    /** Direction of the last force on the ground, x; no unit. */
-    public double directionX() {
-        return travel[0];
-    }
-
-    /** Direction of the last force on the ground, y; no unit. */
-    public double directionY() {
-        return travel[1];
-    }
-
     /** Force of a cylinder when the tool pushes with {@code force} (N) at the last pose; in N, + push. */
     public double cylinder(int cylinder, double force) {
         return fixed.cylinder(cylinder) + force * unit.cylinder(cylinder);

@@ -171,23 +171,8 @@ public final class DutyMaker {
             from = move.to();
             fromAngle = move.angle();
         }
-        sample(
-                pass.moves().size() - 1,
-                begin,
-                1,
-                pass.moves().size() > 1 ? before() : pass.start(),
-                beforeAngle(),
-                payload);
-    }
-
-    private Point before() {
-        return pass.moves().get(pass.moves().size() - 2).to();
-    }
-
-    private double beforeAngle() {
-        return pass.moves().size() > 1
-                ? pass.moves().get(pass.moves().size() - 2).angle()
-                : pass.startAngle();
+        // the end of the last move: all of the way done, so that where it came from no longer counts
+        sample(pass.moves().size() - 1, begin, 1, from, fromAngle, payload);
     }
 
     /** Theory (D5): least jerk from rest to rest. */

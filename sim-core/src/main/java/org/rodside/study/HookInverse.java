@@ -82,31 +82,24 @@ final class HookInverse {
 
     /** Fractions of every pose that brings the place to a point (m), machine axes. */
     List<double[]> solve(double x, double y) {
+        return solve(x, y, Integer.MAX_VALUE);
+    }
+
+    /** Whether some pose brings the place to a point (m), machine axes. */
+    boolean reaches(double x, double y) {
+        return !solve(x, y, 1).isEmpty();
+    }
+
+    private List<double[]> solve(double x, double y, int enough) {
         List<double[]> found = new ArrayList<>();
         for (int i = 0; i < CELLS; i++) {
-            for (int j = 0; j < CELLS; j++) {
+            for (int j = 0; j < CELLS && found.size() < enough; j++) {
                 if (mayHold(cornerX, x, i, j) && mayHold(cornerY, y, i, j)) {
                     search(x, y, (i + 0.5) / CELLS, (j + 0.5) / CELLS, found);
                 }
             }
         }
         return found;
-    }
-
-    /** Whether some pose brings the place to a point (m), machine axes. */
-    boolean reaches(double x, double y) {
-        List<double[]> found = new ArrayList<>();
-        for (int i = 0; i < CELLS; i++) {
-            for (int j = 0; j < CELLS; j++) {
-                if (mayHold(cornerX, x, i, j) && mayHold(cornerY, y, i, j)) {
-                    search(x, y, (i + 0.5) / CELLS, (j + 0.5) / CELLS, found);
-                    if (!found.isEmpty()) {
-                        return true;
-                    }
-                }
-            }
-        }
-        return false;
     }
 
     private static boolean mayHold(double[][] corner, double wanted, int i, int j) {

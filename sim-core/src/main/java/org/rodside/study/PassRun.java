@@ -12,10 +12,9 @@ import org.rodside.units.UnitSystem;
  * A duty taken through history and cycle count in one go, rows handed on as they come.
  *
  * @param met what the history met
- * @param cylinders cycles of the cylinder forces
- * @param all cycles of every force of the history
+ * @param cycles cycles of every force of the history
  */
-public record PassRun(HistoryAccumulator met, CycleCount cylinders, CycleCount all) {
+public record PassRun(HistoryAccumulator met, CycleCount cycles) {
 
     /** Slopes that equivalent ranges are told for; no unit. */
     private static final List<Double> SLOPES = List.of(3.0, 5.0);
@@ -37,50 +36,55 @@ public record PassRun(HistoryAccumulator met, CycleCount cylinders, CycleCount a
      * @param sink takes the rows of the history; SI
      */
     public static PassRun of(Front front, Table duty, UnitSystem units, RowSink sink) {
-        List<Column> columns = columns(front);
-        Counter cylinders = new Counter(columns, units, true);
-        Counter all = new Counter(columns, units, false);
+        Counter counter = new Counter(columns(front), units);
         HistoryAccumulator met = new History(front, question())
                 .run(
                         DutyMaker.source(front, duty),
                         row -> {
                             sink.row(row);
-                            cylinders.row(row);
-                            all.row(row);
+                            counter.row(row);
                         },
                         time -> {});
-        return new PassRun(met, cylinders.counter.finish(), all.counter.finish());
+        return new PassRun(met, counter.cycles.finish());
     }
 
-    /** Counts some of the columns. */
+    /** The cylinder forces alone. */
+    public CycleCount cylinders() {
+        List<CycleCount.Channel> channels = cycles.channels().stream()
+                .filter(channel -> channel.name().contains(".force_"))
+                .toList();
+        return new CycleCount(
+                channels, cycles.options(), cycles.recordings(), cycles.rows(), cycles.seconds(), cycles.factor());
+    }
+
+    /** Counts the columns that are forces. */
     private static final class Counter {
 
         private final List<Integer> chosen = new ArrayList<>();
-        private final CycleCountAccumulator counter;
+        private final CycleCountAccumulator cycles;
         private final double[] values;
         private final UnitSystem units;
 
-        Counter(List<Column> columns, UnitSystem units, boolean cylindersOnly) {
+        Counter(List<Column> columns, UnitSystem units) {
             this.units = units;
             List<String> names = new ArrayList<>();
             for (int i = 0; i < columns.size(); i++) {
                 Column column = columns.get(i);
-                boolean counts = cylindersOnly ? column.name().endsWith(".force") : column.quantity() == Quantity.FORCE;
-                if (counts) {
+                if (column.quantity() == Quantity.FORCE) {
                     chosen.add(i);
                     names.add(column.heading(units));
                 }
             }
             values = new double[names.size()];
-            counter = new CycleCountAccumulator(names, new CycleOptions(SLOPES, 0, false, false, 0, 0, null, 0, null));
-            counter.begin(() -> "duty");
+            cycles = new CycleCountAccumulator(names, new CycleOptions(SLOPES, 0, false, false, 0, 0, null, 0, null));
+            cycles.begin(() -> "duty");
         }
 
         void row(double[] row) {
             for (int i = 0; i < values.length; i++) {
                 values[i] = units.of(row[chosen.get(i)], Quantity.FORCE);
             }
-            counter.row(values, row[0]);
+            cycles.row(values, row[0]);
         }
     }
 }
