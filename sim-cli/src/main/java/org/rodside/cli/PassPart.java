@@ -1,11 +1,10 @@
 package org.rodside.cli;
 
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import org.rodside.io.CsvWriter;
-import org.rodside.io.DutyPassReader;
+import org.rodside.model.DutyPass;
 import org.rodside.model.InputException;
 import org.rodside.report.CyclesReport;
 import org.rodside.report.DutyReport;
@@ -33,10 +32,10 @@ final class PassPart implements StudyPart {
     public Told tell(Desk desk) {
         Front front = desk.front();
         UnitSystem units = desk.common().units();
-        if (!Files.exists(desk.pass())) {
-            throw new InputException(desk.pass() + ": there is no such file; name a pass with --pass PASS.json");
-        }
-        Table duty = DutyMaker.make(front, DutyPassReader.read(desk.pass(), front.linkage()));
+        DutyPass pass = desk.pass()
+                .orElseThrow(() -> new InputException(
+                        desk.passFile() + ": there is no such file; name a pass with --pass PASS.json"));
+        Table duty = DutyMaker.make(front, pass);
         PassRun run = run(desk, duty);
         DutyReport report = new DutyReport(front, duty, run.met(), units);
         desk.folder().ifPresent(folder -> {
@@ -50,7 +49,7 @@ final class PassPart implements StudyPart {
         json.put("cycles", new CyclesReport(run.cycles()).json());
         return new Told(
                 json,
-                "A pass from " + desk.pass().getFileName() + "\n" + report.text() + "\n"
+                "A pass from " + desk.passFile().getFileName() + "\n" + report.text() + "\n"
                         + new CyclesReport(run.cylinders()).text());
     }
 

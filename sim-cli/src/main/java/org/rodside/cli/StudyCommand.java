@@ -1,13 +1,16 @@
 package org.rodside.cli;
 
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.Callable;
+import org.rodside.io.DutyPassReader;
 import org.rodside.io.WholeFile;
+import org.rodside.model.DutyPass;
 import org.rodside.model.InputException;
 import org.rodside.model.Linkage;
 import org.rodside.report.Cautions;
@@ -54,6 +57,10 @@ final class StudyCommand implements Callable<Integer> {
     public Integer call() {
         Linkage linkage = file.read(common);
         Front front = Front.of(linkage);
+        Path passFile = pass == null ? PassPart.usual(file.path()) : pass;
+        Optional<DutyPass> given = pass == null && Files.notExists(passFile)
+                ? Optional.empty()
+                : Optional.of(DutyPassReader.read(passFile, linkage));
         Optional<Path> folder = common.folder(file.path());
         PageWriter page = new PageWriter(
                 linkage.name(),
@@ -65,12 +72,7 @@ final class StudyCommand implements Callable<Integer> {
         page.cautions();
         told.put("name", linkage.name());
         answer(new StudyPart.Desk(
-                front,
-                common,
-                folder,
-                page,
-                new LoadsOnce(front, common.threads()),
-                pass == null ? PassPart.usual(file.path()) : pass));
+                front, common, folder, page, new LoadsOnce(front, common.threads()), given, passFile));
         told.put("left_out", leftOut);
         told.put("cautions", Cautions.estimates());
         folder.ifPresent(

@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Supplier;
+import org.rodside.model.DutyPass;
 import org.rodside.report.PageWriter;
 import org.rodside.study.Front;
 import org.rodside.study.LoadsAnswer;
@@ -13,7 +14,7 @@ interface StudyPart {
 
     /**
      * What a part works on. {@code folder} is empty where no files are wanted; {@code loads} are the worst loads of the usual
-     * cases, searched once when first asked for; {@code pass} is the pass file, which may not exist.
+     * cases, searched once when first asked for; {@code pass} is what {@code passFile} holds, empty where there is no such file.
      */
     record Desk(
             Front front,
@@ -21,7 +22,8 @@ interface StudyPart {
             Optional<Path> folder,
             PageWriter page,
             Supplier<LoadsAnswer> loads,
-            Path pass) {}
+            Optional<DutyPass> pass,
+            Path passFile) {}
 
     /** What a part found: a JSON tree, and text for the one-page summary. */
     record Told(Map<String, Object> json, String text) {}

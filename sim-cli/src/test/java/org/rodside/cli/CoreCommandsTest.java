@@ -107,6 +107,12 @@ class CoreCommandsTest {
     }
 
     @Test
+    void aPassThatIsNamedMustBeThere() {
+        assertEquals(2, run("study", FRONT, "--pass", "nowhere.json", "--json"));
+        assertTrue(err.contains("nowhere.json: there is no such file"), err);
+    }
+
+    @Test
     void setReachesTheForces() throws IOException {
         double plain =
                 json("pose", FRONT, "--at", AT).at("/cylinders/boom/cap_bar").asDouble();

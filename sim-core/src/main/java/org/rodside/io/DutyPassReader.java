@@ -19,6 +19,9 @@ public final class DutyPassReader {
     public static final String FORMAT = "rodside-duty/1";
 
     private static final double MOST_RATE = 10_000;
+    /** Most samples of a pass: five hours and a half at 50 a second; more is a slip of the finger. */
+    private static final double MOST_SAMPLES = 1e6;
+
     private static final Amount DEGREES = Amount.plain("the angle in degrees", Range.ANY);
 
     private final FieldReader file;
@@ -71,12 +74,21 @@ public final class DutyPassReader {
         }
         FieldReader start =
                 file.object("start", "give {\"tip\": [x, y], \"tool_deg\": …}").only("tip", "tool_deg");
+        List<DutyPass.Move> moves = moves();
+        double seconds = moves.stream().mapToDouble(DutyPass.Move::seconds).sum();
+        if (rate * seconds > MOST_SAMPLES) {
+            file.fault(
+                    "moves",
+                    "take " + seconds + " s in all, which at " + rate
+                            + " samples a second is more than a million samples;"
+                            + " give shorter moves or a smaller rate_hz");
+        }
         return new DutyPass(
                 rate,
                 file.has("ground") ? Optional.of(soil()) : Optional.empty(),
                 start.point("tip", coordinate),
                 Unit.DEGREE.toSi(start.number("tool_deg", DEGREES)),
-                moves(),
+                moves,
                 hold(linkage));
     }
 

@@ -117,6 +117,7 @@ class DutyMakerTest {
                 "\"rate_hz\": 50|\"rate_hz\": 0|rate_hz",
                 "\"rate_hz\": 50|\"rate_hz\": 50, \"rate\": 3|rate",
                 "\"seconds\": 1.6|\"seconds\": -1|moves.0.seconds",
+                "\"seconds\": 1.6|\"seconds\": 1e7|more than a million samples",
                 "\"friction_deg\": 32|\"friction_deg\": 95|ground.friction_deg",
                 "\"empty\": true|\"empty\": \"yes\"|moves.4.empty",
                 "rodside-duty/1|rodside-duty/9|format",
