@@ -7,10 +7,11 @@ import java.util.List;
 import java.util.SplittableRandom;
 
 /**
- * Largest value of a function of the stroke fractions over the whole stroke box: a grid finds the hills, each of the highest
- * is climbed along its ridges, cells that could hide a higher peak are looked into, and a pattern search finds the last
- * digits. The function may have kinks (it often is the least of several
- * limits) and may have no value (NaN) at some poses. The same call always gives the same bits.
+ * Largest value of a function of the stroke fractions over the whole stroke box (theory W1): a grid finds the hills; the highest of
+ * them, the corners of the box and some grid points drawn at random are climbed along their ridges; the strokes are scanned one by one
+ * through the best place, for peaks too narrow for the grid; a pattern search finds the last digits. The function may have
+ * kinks (it often is the least of several limits) and may have no value (NaN) at some poses. The same call always gives the
+ * same bits.
  */
 public final class BoxMaximum {
 
@@ -23,6 +24,18 @@ public final class BoxMaximum {
          * @return the value; NaN where there is none
          */
         double at(double[] fractions);
+
+        /** Number of smooth pieces of which the value is the least; 1 where the value itself is smooth. */
+        default int pieces() {
+            return 1;
+        }
+
+        /**
+         * The pieces at the pose asked for last; not asked of a function that is one piece.
+         *
+         * @param out one value a piece, overwritten; infinite or NaN where a piece does not count
+         */
+        default void tellPieces(double[] out) {}
     }
 
     /** Grid points an axis for 1, 2, 3, 4, … free cylinders. */
@@ -31,14 +44,16 @@ public final class BoxMaximum {
     /** Hills that are climbed. */
     private static final int CLIMBS = 16;
 
+    /** Grid points climbed besides, drawn at random: a plateau shows no hills. */
+    private static final int RANDOM_STARTS = 8;
+
+    /** Steps of the scan along each stroke: near a dead centre a peak may be this narrow, but only along one stroke. */
+    private static final int SCAN = 64;
+
     /** Grid values that differ by less than this share are the same height: rounding; no unit. */
     private static final double SAME = 1e-9;
 
-    /** The search ends when its stride falls below this share of a stroke; no unit. */
-    private static final double LAST_STRIDE = 1e-9;
-
-    /** Random directions tried, beside the regular ones, before a stride is halved: they follow slanting ridges. */
-    private static final int RANDOM_DIRECTIONS = 24;
+    private static final int SEED = 20260101;
 
     private final int[] free;
     private final double[] start;
@@ -101,18 +116,24 @@ public final class BoxMaximum {
      */
     public Optimum findFrom(double[] values, Objective objective) {
         Optimum best = new Optimum(Double.NaN, start);
+        if (free.length == 0) {
+            return new Optimum(values[0], start);
+        }
         RidgeClimber ridge = new RidgeClimber(objective, free);
         for (int cell : hills(values)) {
             if (!best.exists() || values[cell] + 2 * drop(values, cell) > best.value()) {
-                Optimum top = new Optimum(values[cell], point(cell));
-                top = free.length == 0 ? top : ridge.climb(top);
-                best = !best.exists() || top.value() > best.value() ? top : best;
+                best = climbFrom(cell, values, ridge, best);
             }
         }
-        if (free.length == 0 || !best.exists()) {
+        if (!best.exists()) {
             return best;
         }
-        return climb(objective, ridge.top(new CellSearch(objective, free).open(best, values, grid)));
+        best = climbFromCorners(values, ridge, best);
+        best = climbAtRandom(values, ridge, best);
+        for (int axis : free) {
+            best = scan(objective, ridge, best, axis);
+        }
+        return new PatternSearch(objective, free).lastDigits(ridge.top(best));
     }
 
     /** Climbs from a given pose only. */
@@ -121,7 +142,7 @@ public final class BoxMaximum {
         if (free.length == 0 || !from.exists()) {
             return from;
         }
-        return climb(objective, new RidgeClimber(objective, free).top(from));
+        return new PatternSearch(objective, free).lastDigits(new RidgeClimber(objective, free).top(from));
     }
 
     /** Number of grid points. */
@@ -147,6 +168,10 @@ public final class BoxMaximum {
             rest /= grid;
         }
         return point;
+    }
+
+    private static Optimum higher(Optimum best, Optimum other) {
+        return !best.exists() || other.value() > best.value() ? other : best;
     }
 
     private double[] gridValues(Objective objective) {
@@ -213,68 +238,54 @@ public final class BoxMaximum {
         return drop;
     }
 
-    private Optimum climb(Objective objective, Optimum from) {
-        double[] here = from.at().clone();
-        double[] trial = here.clone();
-        double value = from.value();
-        if (free.length == 0 || Double.isNaN(value)) {
-            return from;
-        }
-        List<double[]> regular = regularDirections();
-        SplittableRandom random = new SplittableRandom(20260101);
-        double stride = 0.5 / Math.max(1, grid - 1);
-        while (stride > LAST_STRIDE) {
-            double better = value;
-            for (int i = 0; i < regular.size() + RANDOM_DIRECTIONS && !(better > value); i++) {
-                double[] direction = i < regular.size() ? regular.get(i) : randomDirection(random);
-                step(here, direction, stride, trial);
-                better = objective.at(trial);
+    private Optimum climbFromCorners(double[] values, RidgeClimber ridge, Optimum from) {
+        Optimum best = from;
+        for (int corner = 0; corner < 1 << free.length; corner++) {
+            int cell = 0;
+            int far = grid - 1;
+            for (int a = 0; a < free.length; a++) {
+                cell += (corner >> a & 1) * far;
+                far *= grid;
             }
-            if (better > value) {
-                value = better;
-                System.arraycopy(trial, 0, here, 0, here.length);
-                stride = Math.min(0.25, 2 * stride);
-            } else {
-                stride /= 4;
-            }
+            best = climbFrom(cell, values, ridge, best);
         }
-        return new Optimum(value, here);
+        return best;
     }
 
-    private void step(double[] here, double[] direction, double stride, double[] out) {
-        for (int i = 0; i < free.length; i++) {
-            int axis = free[i];
-            out[axis] = Math.max(0, Math.min(1, here[axis] + stride * direction[i]));
+    private Optimum climbAtRandom(double[] values, RidgeClimber ridge, Optimum from) {
+        SplittableRandom random = new SplittableRandom(SEED);
+        Optimum best = from;
+        for (int i = 0; i < RANDOM_STARTS; i++) {
+            best = climbFrom(random.nextInt(values.length), values, ridge, best);
         }
+        return best;
     }
 
-    private List<double[]> regularDirections() {
-        List<double[]> directions = new ArrayList<>();
-        int count = (int) Math.pow(3, Math.min(free.length, 3));
-        for (int code = 0; code < count; code++) {
-            double[] direction = new double[free.length];
-            int rest = code;
-            for (int i = 0; i < Math.min(free.length, 3); i++) {
-                direction[i] = rest % 3 - 1;
-                rest /= 3;
-            }
-            directions.add(direction);
-        }
-        for (int i = 3; i < free.length; i++) {
-            for (int sign = -1; sign <= 1; sign += 2) {
-                double[] direction = new double[free.length];
-                direction[i] = sign;
-                directions.add(direction);
-            }
-        }
-        return directions;
+    private Optimum climbFrom(int cell, double[] values, RidgeClimber ridge, Optimum best) {
+        return Double.isNaN(values[cell])
+                ? best
+                : higher(best, ridge.climb(new Optimum(values[cell], point(cell)), best.value()));
     }
 
-    private double[] randomDirection(SplittableRandom random) {
-        double[] direction = new double[free.length];
-        for (int i = 0; i < direction.length; i++) {
-            direction[i] = random.nextDouble(-1, 1);
+    /** Climbs from every top on the line along one stroke through a place. */
+    private static Optimum scan(Objective objective, RidgeClimber ridge, Optimum from, int axis) {
+        double[] at = from.at().clone();
+        double[] line = new double[SCAN + 3];
+        line[0] = Double.NaN;
+        line[SCAN + 2] = Double.NaN;
+        for (int i = 0; i <= SCAN; i++) {
+            at[axis] = i / (double) SCAN;
+            line[1 + i] = objective.at(at);
         }
-        return direction;
+        Optimum best = from;
+        for (int i = 0; i <= SCAN; i++) {
+            double value = line[1 + i];
+            boolean here = Math.abs(i / (double) SCAN - from.at()[axis]) < 1.5 / SCAN;
+            if (!Double.isNaN(value) && !here && !(line[i] > value) && !(line[i + 2] > value)) {
+                at[axis] = i / (double) SCAN;
+                best = higher(best, ridge.climb(new Optimum(value, at.clone()), best.value()));
+            }
+        }
+        return best;
     }
 }

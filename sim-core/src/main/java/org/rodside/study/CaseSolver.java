@@ -98,6 +98,26 @@ final class CaseSolver {
                 : dig.fixed().bearingY(bearing) + tool * dig.unit().bearingY(bearing);
     }
 
+    /** The tool force; in N, 0 where the case has none of its own. */
+    double tool() {
+        return tool;
+    }
+
+    /** Takes another tool force at the pose solved last; in N. */
+    void use(double force) {
+        tool = force;
+    }
+
+    /** Number of lines along which the tool force may meet a limit; 0 where the case has no tool force of its own. */
+    int lines() {
+        return dig == null ? 0 : dig.limits().lines();
+    }
+
+    /** Tool force at which one line meets its limit, {@link LimitSolver#meeting}; in N. */
+    double meeting(int line) {
+        return dig.limits().meeting(line);
+    }
+
     /** The pose solved last. */
     PoseBuffer pose() {
         return solver.pose();

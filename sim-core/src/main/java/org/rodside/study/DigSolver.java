@@ -68,6 +68,29 @@ public final class DigSolver {
         return limits.largest(fixed, unit, fixedGround, unitGround);
     }
 
+    /** The force as a function of the pose that tells its pieces, one for each line that may meet a limit. */
+    BoxMaximum.Objective asObjective() {
+        return new BoxMaximum.Objective() {
+            @Override
+            public double at(double[] fractions) {
+                double force = force(fractions);
+                return Double.isInfinite(force) ? Double.NaN : force;
+            }
+
+            @Override
+            public int pieces() {
+                return limits.lines();
+            }
+
+            @Override
+            public void tellPieces(double[] out) {
+                for (int line = 0; line < out.length; line++) {
+                    out[line] = limits.meeting(line);
+                }
+            }
+        };
+    }
+
     /** The force at which the duty cylinder alone meets its driving push limit without any other load; in N. */
     public double alone(double[] fractions) {
         if (solver.place(fractions) != PoseSolver.ASSEMBLED || !direct()) {

@@ -12,6 +12,9 @@ public final class Digging {
     private final FrontSolver solver;
     private final Edge edge;
 
+    /** Curl stroke of rated forces once it is known. */
+    private double curlStroke = Double.NaN;
+
     public Digging(Front front, Edge edge) {
         this.front = front;
         this.edge = edge;
@@ -49,26 +52,20 @@ public final class Digging {
     }
 
     private DigForce rated(int duty) {
+        if (Double.isNaN(curlStroke)) {
+            curlStroke = new CurlStroke(front, new DigSolver(solver, edge.of(front), front.curl(), true)).find();
+        }
         double[] fixed = new double[front.mechanism().cylinders()];
         Arrays.fill(fixed, Double.NaN);
-        fixed[front.curl()] = bestCurl();
+        fixed[front.curl()] = curlStroke;
         DigSolver dig = new DigSolver(solver, edge.of(front), duty, true);
-        Optimum best = new BoxMaximum(fixed).find(fractions -> finite(dig.force(fractions)));
+        Optimum best = Double.isNaN(curlStroke)
+                ? new Optimum(Double.NaN, fixed)
+                : new BoxMaximum(fixed).find(dig.asObjective());
         if (!best.exists()) {
             throw new InputException("cylinders: no pose of the stroke box gives a digging force; see 'check'");
         }
         double force = dig.force(best.at());
         return new DigForce(force, dig.limits().name(dig.governing()), best.at());
-    }
-
-    private double bestCurl() {
-        DigSolver curl = new DigSolver(solver, edge.of(front), front.curl(), true);
-        return BoxMaximum.overAll(front.mechanism().cylinders())
-                .find(fractions -> finite(curl.alone(fractions)))
-                .at()[front.curl()];
-    }
-
-    private static double finite(double value) {
-        return Double.isInfinite(value) ? Double.NaN : value;
     }
 }

@@ -1,6 +1,7 @@
 package org.rodside.study;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import org.rodside.hydraulics.CylinderLimits;
 import org.rodside.model.Machine;
@@ -25,6 +26,7 @@ public final class LimitSolver {
     private final double front;
     private final double rear;
     private final double grip;
+    private final double[] meeting;
     private double largest;
     private int governing;
 
@@ -51,6 +53,8 @@ public final class LimitSolver {
         this.front = stability ? machine.tippingFront() : Double.NaN;
         rear = stability ? machine.tippingRear() : Double.NaN;
         grip = stability && machine.grip().isPresent() ? machine.grip().getAsDouble() : Double.NaN;
+        meeting = new double[2 * cylinders + 4];
+        Arrays.fill(meeting, Double.POSITIVE_INFINITY);
     }
 
     /** True where tipping and slip count, so that the ground must be summed. */
@@ -83,13 +87,13 @@ public final class LimitSolver {
         largestOnCylinders(fixed, unit);
         if (stability) {
             int next = 2 * push.length;
-            meet(next, -fixedGround.momentAbout(front), -unitGround.momentAbout(front), 0);
-            meet(next + 1, fixedGround.momentAbout(rear), unitGround.momentAbout(rear), 0);
+            meet(next, next, -fixedGround.momentAbout(front), -unitGround.momentAbout(front), 0);
+            meet(next + 1, next + 1, fixedGround.momentAbout(rear), unitGround.momentAbout(rear), 0);
             if (!Double.isNaN(grip)) {
                 double fixedGrip = grip * fixedGround.normal();
                 double unitGrip = grip * unitGround.normal();
-                meet(next + 2, fixedGround.horizontal() - fixedGrip, unitGround.horizontal() - unitGrip, 0);
-                meet(next + 2, -fixedGround.horizontal() - fixedGrip, -unitGround.horizontal() - unitGrip, 0);
+                meet(next + 2, next + 2, fixedGround.horizontal() - fixedGrip, unitGround.horizontal() - unitGrip, 0);
+                meet(next + 3, next + 2, -fixedGround.horizontal() - fixedGrip, -unitGround.horizontal() - unitGrip, 0);
             }
         }
         return largest;
@@ -100,8 +104,8 @@ public final class LimitSolver {
         largest = Double.POSITIVE_INFINITY;
         governing = NONE;
         for (int c = 0; c < push.length; c++) {
-            meet(2 * c, fixed.cylinder(c), unit.cylinder(c), push[c]);
-            meet(2 * c + 1, -fixed.cylinder(c), -unit.cylinder(c), pull[c]);
+            meet(2 * c, 2 * c, fixed.cylinder(c), unit.cylinder(c), push[c]);
+            meet(2 * c + 1, 2 * c + 1, -fixed.cylinder(c), -unit.cylinder(c), pull[c]);
         }
         return largest;
     }
@@ -111,13 +115,30 @@ public final class LimitSolver {
         return governing;
     }
 
-    private void meet(int limit, double fixed, double unit, double most) {
+    /** Number of lines against which the last answer was held; slip counts twice, once for each direction. */
+    int lines() {
+        return meeting.length;
+    }
+
+    /**
+     * Load factor at which one line meets its limit, smooth in the pose as long as it stays finite.
+     *
+     * @param line 0 to {@link #lines()} - 1
+     * @return the factor, below zero where the limit is broken without any load and load breaks it further; infinite where it is
+     *     never met
+     */
+    double meeting(int line) {
+        return meeting[line];
+    }
+
+    private void meet(int line, int limit, double fixed, double unit, double most) {
         if (Double.isNaN(fixed) || Double.isNaN(unit)) {
             largest = Double.NaN;
             return;
         }
         double room = most - fixed;
-        double t = room < 0 ? 0 : unit > 0 ? room / unit : Double.POSITIVE_INFINITY;
+        meeting[line] = unit > 0 ? room / unit : Double.POSITIVE_INFINITY;
+        double t = room < 0 ? 0 : meeting[line];
         if (t < largest) {
             largest = t;
             governing = limit;

@@ -73,11 +73,9 @@ final class PushProfile {
         if (best < 0) {
             return new Worst(Double.POSITIVE_INFINITY, 0, Double.NaN, Double.NaN);
         }
-        Optimum top = search.climbFrom(
-                at -> solver.solve(at)
-                        ? solver.cylinder(c) / column.critical(solver.pose().length(c))
-                        : Double.NaN,
-                search.point(cell[c][best]));
+        LoadQuantity work = new LoadQuantity(
+                solver, () -> solver.cylinder(c) / column.critical(solver.pose().length(c)));
+        Optimum top = search.climbFrom(work, search.point(cell[c][best]));
         return worst(c, solver, top.at(), column);
     }
 

@@ -111,19 +111,49 @@ final class RangeDimensions {
     }
 
     private Optimum swing() {
-        Optimum best = best(() -> -mostX() - GROUND_PENALTY * Math.max(0, -leastY()));
+        Optimum best = new BoxMaximum(free).find(new SwingRoom());
         return best.exists() && read(best.at(), this::leastY) >= -ABOVE ? best : new Optimum(Double.NaN, free);
     }
 
-    private double mostX() {
-        double most = Double.NEGATIVE_INFINITY;
-        for (int pin = 0; pin < front.mechanism().pins(); pin++) {
-            most = Math.max(most, pose.pinX(pin));
+    /** The swing radius, less is better, with what lies below ground charged; its pieces pair an outermost with a lowest place. */
+    private final class SwingRoom implements BoxMaximum.Objective {
+
+        private final int pins = front.mechanism().pins();
+        private final Point[] points = toolPoints().values().toArray(new Point[0]);
+        private final int places = pins + points.length;
+
+        @Override
+        public double at(double[] fractions) {
+            return read(fractions, () -> {
+                double most = Double.NEGATIVE_INFINITY;
+                for (int i = 0; i < places; i++) {
+                    most = Math.max(most, x(i));
+                }
+                return -most - GROUND_PENALTY * Math.max(0, -leastY());
+            });
         }
-        for (Point point : toolPoints().values()) {
-            most = Math.max(most, pose.x(tip.body(), point.x(), point.y()));
+
+        @Override
+        public int pieces() {
+            return places * (places + 1);
         }
-        return most;
+
+        @Override
+        public void tellPieces(double[] out) {
+            for (int i = 0; i < places; i++) {
+                for (int j = 0; j <= places; j++) {
+                    out[i * (places + 1) + j] = -x(i) + (j == places ? 0 : GROUND_PENALTY * y(j));
+                }
+            }
+        }
+
+        private double x(int i) {
+            return i < pins ? pose.pinX(i) : pose.x(tip.body(), points[i - pins].x(), points[i - pins].y());
+        }
+
+        private double y(int i) {
+            return i < pins ? pose.pinY(i) : pose.y(tip.body(), points[i - pins].x(), points[i - pins].y());
+        }
     }
 
     private double leastY() {

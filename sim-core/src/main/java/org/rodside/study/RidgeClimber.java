@@ -1,63 +1,62 @@
 package org.rodside.study;
 
-import java.util.ArrayList;
-import java.util.List;
-import java.util.SplittableRandom;
-import org.apache.commons.math3.exception.MathIllegalStateException;
-import org.apache.commons.math3.optim.MaxIter;
-import org.apache.commons.math3.optim.linear.LinearConstraint;
-import org.apache.commons.math3.optim.linear.LinearConstraintSet;
-import org.apache.commons.math3.optim.linear.LinearObjectiveFunction;
-import org.apache.commons.math3.optim.linear.NonNegativeConstraint;
-import org.apache.commons.math3.optim.linear.Relationship;
-import org.apache.commons.math3.optim.linear.SimplexSolver;
-import org.apache.commons.math3.optim.nonlinear.scalar.GoalType;
+import java.util.Arrays;
 
 /**
  * Climbs along ridges (theory W1). Under a tool force every load is the least of several smooth pieces, one a limit; its
- * peaks sit on sharp ridges that slant through the stroke box, where a search along fixed directions stops. Here the slope
- * is taken at several places about the present one, so that every piece near it is met; the highest point under all those
- * tangent planes within a small box is a linear programme, and its answer is the next trial (cutting planes, Kelley 1960,
- * with a trust region; recalled). The box shrinks where the trial is no higher. Never leaves the stroke box, never ends
- * lower than it started; the same call gives the same bits. Not thread-safe.
+ * peaks sit on sharp ridges that slant through the stroke box, where a search along fixed directions stops. One slope
+ * along each stroke gives the tangent planes of all pieces; the highest point under all of them within a small box is
+ * the next trial; the planes serve until a trial in an ever smaller box about the same place is higher (successive linear
+ * programmes with a trust region and a second-order step, any textbook of optimisation; recalled). Never leaves the
+ * stroke box, never ends lower than it started; the same call gives the same bits. Not thread-safe.
  */
 final class RidgeClimber {
 
-    /** First and last half-width of the small box; share of a stroke. */
+    /** First half-width of the small box; share of a stroke. */
     private static final double FIRST = 0.02;
-
-    private static final double LAST = 1e-7;
 
     /** Widest that the small box may grow; share of a stroke. */
     private static final double WIDEST = 0.1;
 
-    /** Step of a slope over the half-width of the small box: seldom astride a kink, far above rounding; no unit. */
-    private static final double SLOPE_STEP = 1e-3;
-
     /** Steps of one climb from a hill, and of one that is to reach the top. */
     private static final int FEW_STEPS = 24;
 
-    private static final int MANY_STEPS = 80;
+    private static final int MANY_STEPS = 120;
 
-    /** Climbs to the top start anew while they gain more than this share: the small box has to grow again; no unit. */
-    private static final double GAIN = 1e-7;
+    /** A place that beats another by less than this share is not sought; no unit. */
+    private static final double BARELY = 1e-8;
 
-    private static final int MOST_RESTARTS = 12;
+    /** Last half-width of the small box: beyond it a slope is left that rounding alone may make; share of a stroke. */
+    private static final double LAST = 1e-9;
 
-    /** Trials that were no higher and whose own planes are added before the box shrinks. */
-    private static final int CUTS = 4;
+    /** Step of a slope: its square against the box, and rounding over it, both stay near 1e-10; share of a stroke. */
+    private static final double SLOPE_STEP = 1e-6;
 
-    private static final int MOST_PIVOTS = 200;
-    private static final int SEED = 20260102;
+    /** A climb ends where the planes promise no more than this share; no unit. */
+    private static final double PROMISE = 1e-11;
+
+    /** Shrinking after a trial that was no higher: least and most; no unit. */
+    private static final double LEAST_LEFT = 0.1;
+
+    private static final double MOST_LEFT = 0.5;
+
+    /** The box grows where a trial keeps this share of what the planes promised; no unit. */
+    private static final double KEPT = 0.7;
 
     private final BoxMaximum.Objective objective;
     private final int[] free;
     private final int n;
-    private SplittableRandom random;
+    private final TangentPlanes planes;
+    private final double[] width;
+    private final double[] centre;
+    private final double[] place;
+    private final double[] pieces;
+    private final double[][] slopes;
+    private final double[] bent;
+    private double[] trial;
     private double[] here;
     private double value;
-    private double width;
-    private double base;
+    private double reached;
 
     /**
      * @param objective what is to be made largest
@@ -67,129 +66,168 @@ final class RidgeClimber {
         this.objective = objective;
         this.free = free;
         n = free.length;
+        planes = new TangentPlanes(n);
+        width = new double[n];
+        centre = new double[n];
+        place = new double[n];
+        pieces = new double[objective.pieces()];
+        slopes = new double[objective.pieces()][n];
+        bent = new double[objective.pieces()];
     }
 
     /** Climbs from a pose that has a value until nothing more is gained. */
     Optimum top(Optimum from) {
-        Optimum best = from;
-        for (int i = 0; i < MOST_RESTARTS; i++) {
-            Optimum next = climb(best, MANY_STEPS);
-            boolean still = next.value() > best.value() + GAIN * Math.abs(best.value());
-            best = next;
-            if (!still) {
-                break;
-            }
-        }
-        return best;
+        return climb(from, MANY_STEPS, Double.NaN);
     }
 
-    /** Climbs some way from a pose that has a value. */
-    Optimum climb(Optimum from) {
-        return climb(from, FEW_STEPS);
+    /**
+     * Climbs some way from a pose that has a value.
+     *
+     * @param toBeat a climb that seems to end no higher is given up; NaN where none is to be
+     */
+    Optimum climb(Optimum from, double toBeat) {
+        return climb(from, FEW_STEPS, toBeat);
     }
 
-    private Optimum climb(Optimum from, int steps) {
+    private Optimum climb(Optimum from, int steps, double toBeat) {
         here = from.at().clone();
         value = from.value();
-        width = FIRST;
-        random = new SplittableRandom(SEED);
-        for (int i = 0; i < steps && width > LAST; i++) {
-            step();
+        trial = here.clone();
+        Arrays.fill(width, FIRST);
+        boolean rises = true;
+        for (int i = 0; i < steps && rises; i++) {
+            takeSlopes();
+            rises = !hopeless(toBeat) && step();
         }
         return new Optimum(value, here);
     }
 
-    private void step() {
-        double before = value;
-        base = before;
-        List<LinearConstraint> planes = new ArrayList<>();
-        double[] centre = here;
-        addPlane(centre, centre, before, planes);
-        for (int i = 0; i < 2 * n; i++) {
-            double[] near = centre.clone();
-            for (int axis : free) {
-                near[axis] = clamp(centre[axis] + width * random.nextDouble(-1, 1));
+    /** Goes to a higher place; false where none is found however small the box. */
+    private boolean step() {
+        while (Arrays.stream(width).max().orElseThrow() > LAST) {
+            layPlanes(here, pieces);
+            if (!planes.highest(width, place)) {
+                scale(LEAST_LEFT);
+                continue;
             }
-            double reached = objective.at(near);
-            addPlane(centre, near, reached, planes);
-            take(near, reached);
-        }
-        boolean planned = false;
-        for (int i = 0; i < CUTS && !planned; i++) {
-            double[] trial = highest(centre, planes);
-            double top = trial == null ? Double.NaN : objective.at(trial);
-            planned = top > value;
-            if (planned) {
-                take(trial, top);
-            } else if (trial == null || Double.isNaN(top)) {
-                break;
-            } else {
-                addPlane(centre, trial, top, planes);
+            double promised = planes.rise();
+            if (!(promised > PROMISE * Math.abs(value))) {
+                return false;
             }
+            double gain = tryPlace();
+            if (Double.isNaN(gain)) {
+                shrinkBeforeTheEnd();
+                continue;
+            }
+            gain = gain > 0 ? gain : Math.max(gain, tryBent(gain));
+            if (gain > 0) {
+                scale(gain > KEPT * promised ? 2 : 1);
+                value = reached;
+                here = trial.clone();
+                return true;
+            }
+            // what falls short of the planes grows with the square of the way
+            scale(Math.max(LEAST_LEFT, Math.min(MOST_LEFT, promised / (2 * (promised - gain)))));
         }
-        width = planned ? Math.min(WIDEST, 2 * width) : value > before ? width * 0.7 : width / 3;
+        return false;
     }
 
-    private void take(double[] at, double reached) {
-        if (reached > value) {
-            value = reached;
-            here = at;
-        }
+    private boolean hopeless(double toBeat) {
+        layPlanes(here, pieces);
+        return value + planes.most() <= toBeat + BARELY * Math.abs(toBeat);
     }
 
-    private static double clamp(double fraction) {
-        return Math.max(0, Math.min(1, fraction));
-    }
-
-    /** The plane t ≤ f + g·(x − near), x counted from the lower corner of the small box round the centre. */
-    private void addPlane(double[] centre, double[] near, double f, List<LinearConstraint> planes) {
-        double[] row = new double[n + 1];
-        double right = f;
-        double step = width * SLOPE_STEP;
+    private void scale(double by) {
         for (int a = 0; a < n; a++) {
-            int axis = free[a];
-            double[] beside = near.clone();
-            beside[axis] = near[axis] + step > 1 ? near[axis] - step : near[axis] + step;
-            double slope = (objective.at(beside) - f) / (beside[axis] - near[axis]);
-            row[a] = -slope;
-            right += slope * (low(centre, axis) - near[axis]);
-        }
-        row[n] = 1;
-        if (Math.abs(right) < Double.POSITIVE_INFINITY) {
-            planes.add(new LinearConstraint(row, Relationship.LEQ, right - base));
+            width[a] = Math.min(WIDEST, by * width[a]);
         }
     }
 
-    private double low(double[] centre, int axis) {
-        return clamp(centre[axis] - width);
-    }
-
-    /** Highest point under all planes within the small box; null where there is none. */
-    private double[] highest(double[] centre, List<LinearConstraint> planes) {
-        double[] goal = new double[n + 1];
-        goal[n] = 1;
-        List<LinearConstraint> all = new ArrayList<>(planes);
+    /** The trial does not stand: the box shrinks along the strokes without which it would, or along all. */
+    private void shrinkBeforeTheEnd() {
+        boolean found = false;
         for (int a = 0; a < n; a++) {
-            double[] row = new double[n + 1];
-            row[a] = 1;
-            all.add(new LinearConstraint(row, Relationship.LEQ, clamp(centre[free[a]] + width) - low(centre, free[a])));
-        }
-        try {
-            double[] found = new SimplexSolver()
-                    .optimize(
-                            new MaxIter(MOST_PIVOTS),
-                            new LinearObjectiveFunction(goal, 0),
-                            new LinearConstraintSet(all),
-                            GoalType.MAXIMIZE,
-                            new NonNegativeConstraint(true))
-                    .getPoint();
-            double[] trial = centre.clone();
-            for (int a = 0; a < n; a++) {
-                trial[free[a]] = clamp(low(centre, free[a]) + found[a]);
+            double gone = trial[free[a]];
+            trial[free[a]] = here[free[a]];
+            if (!Double.isNaN(objective.at(trial))) {
+                width[a] *= MOST_LEFT;
+                found = true;
             }
-            return trial;
-        } catch (MathIllegalStateException e) {
-            return null;
+            trial[free[a]] = gone;
+        }
+        if (!found) {
+            scale(MOST_LEFT);
+        }
+    }
+
+    /** Tries once more with the same slopes through what the pieces are at the trial: follows a ridge that bends. */
+    private double tryBent(double gain) {
+        if (bent.length == 1) {
+            return gain;
+        }
+        tellPieces(reached, bent);
+        layPlanes(trial, bent);
+        double again = planes.highest(width, place) ? tryPlace() : gain;
+        return Double.isNaN(again) ? gain : again;
+    }
+
+    /** Takes the place the planes point to as the next trial; what it gains. */
+    private double tryPlace() {
+        System.arraycopy(here, 0, trial, 0, here.length);
+        for (int a = 0; a < n; a++) {
+            trial[free[a]] = place[a];
+        }
+        reached = objective.at(trial);
+        return reached - value;
+    }
+
+    /** Planes of the present slopes through pieces at a place. */
+    private void layPlanes(double[] at, double[] through) {
+        planes.begin(onAxes(here, centre), value);
+        onAxes(at, place);
+        for (int p = 0; p < through.length; p++) {
+            planes.add(place, through[p], slopes[p]);
+        }
+    }
+
+    private double[] onAxes(double[] at, double[] out) {
+        for (int a = 0; a < n; a++) {
+            out[a] = at[free[a]];
+        }
+        return out;
+    }
+
+    /** All pieces at the present place and their slopes. */
+    private void takeSlopes() {
+        tellPieces(objective.at(here), pieces);
+        System.arraycopy(here, 0, trial, 0, here.length);
+        for (int a = 0; a < n; a++) {
+            double step = here[free[a]] + SLOPE_STEP > 1 ? -SLOPE_STEP : SLOPE_STEP;
+            takeSlope(a, step);
+            if (Double.isNaN(reached)) {
+                takeSlope(a, -step);
+            }
+        }
+    }
+
+    /** Slopes along one axis by a small step; NaN where the pose beside does not stand. */
+    private void takeSlope(int a, double by) {
+        int axis = free[a];
+        trial[axis] = Math.max(0, Math.min(1, here[axis] + by));
+        reached = objective.at(trial);
+        tellPieces(reached, bent);
+        double step = trial[axis] - here[axis];
+        for (int p = 0; p < slopes.length; p++) {
+            slopes[p][a] = Double.isNaN(reached) ? Double.NaN : (bent[p] - pieces[p]) / step;
+        }
+        trial[axis] = here[axis];
+    }
+
+    private void tellPieces(double whole, double[] out) {
+        if (out.length == 1) {
+            out[0] = whole;
+        } else {
+            objective.tellPieces(out);
         }
     }
 }

@@ -3,9 +3,9 @@ package org.rodside.study;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
-import java.util.function.Consumer;
 import java.util.function.DoubleConsumer;
 import java.util.function.IntFunction;
+import java.util.stream.IntStream;
 import org.rodside.hydraulics.Column;
 import org.rodside.hydraulics.CylinderLimits;
 import org.rodside.hydraulics.CylinderPressure;
@@ -23,9 +23,6 @@ public final class WorstLoads {
     /** Density of what fills the bucket where nothing else is said: moist loam; in kg/m³. */
     public static final double USUAL_DENSITY = 1800;
 
-    /** The usual first grid is this many times finer than for one quantity, for it serves them all; no unit. */
-    private static final int REFINEMENT = 2;
-
     /** A load beyond the relief by less than this share is at it; no unit. */
     private static final double ROUNDING = 1e-6;
 
@@ -33,6 +30,7 @@ public final class WorstLoads {
     private final Mechanism mechanism;
     private final int threads;
     private final BoxMaximum search;
+    private final int[] twin;
     private final List<Column> columns;
     private final List<CylinderPressure> pressures;
     private final List<LoadsAnswer.OnCylinder> onCylinders = new ArrayList<>();
@@ -46,6 +44,7 @@ public final class WorstLoads {
         double[] all = new double[mechanism.cylinders()];
         Arrays.fill(all, Double.NaN);
         search = new BoxMaximum(all, refinement);
+        twin = twins();
         columns = front.linkage().cylinders().stream().map(Column::of).toList();
         pressures = front.linkage().cylinders().stream()
                 .map(c -> CylinderPressure.of(c, false))
@@ -83,7 +82,7 @@ public final class WorstLoads {
 
     /** Searches all cases. */
     public static LoadsAnswer find(Front front, List<LoadCase> cases, int threads, DoubleConsumer progress) {
-        return find(front, cases, threads, REFINEMENT, progress);
+        return find(front, cases, threads, 1, progress);
     }
 
     /** As {@link #find(Front, List, int, DoubleConsumer)} with a grid that many times finer. */
@@ -154,38 +153,68 @@ public final class WorstLoads {
         return list;
     }
 
+    /**
+     * For every quantity the first that always has the same size: two links on a pin without a cylinder press on each other
+     * alike.
+     */
+    private int[] twins() {
+        int[] first = IntStream.range(0, quantities()).toArray();
+        for (int b = 0; b < mechanism.bearings(); b++) {
+            for (int other = 0; other < b; other++) {
+                int pin = mechanism.bearingPin(b);
+                if (mechanism.bearingPin(other) == pin && mechanism.bodiesAt(pin).length == 2 && !holdsCylinder(pin)) {
+                    first[3 * mechanism.cylinders() + b] = 3 * mechanism.cylinders() + other;
+                }
+            }
+        }
+        return first;
+    }
+
+    private boolean holdsCylinder(int pin) {
+        String name = mechanism.pinName(pin);
+        return front.linkage().cylinders().stream()
+                .anyMatch(c -> c.capPin().equals(name) || c.rodPin().equals(name));
+    }
+
     /** Number of quantities: push, pull and buckling of every cylinder, size of every bearing force. */
     private int quantities() {
         return 3 * mechanism.cylinders() + mechanism.bearings();
     }
 
-    /** A quantity at the pose a solver stands at; larger is worse; one that stays below zero does not occur; NaN where it is not finite. */
-    private double quantity(CaseSolver solver, int quantity) {
-        double value = anyQuantity(solver, quantity);
-        return Math.abs(value) < Double.POSITIVE_INFINITY ? value : Double.NaN;
-    }
-
-    private double anyQuantity(CaseSolver solver, int quantity) {
+    private LoadQuantity quantity(CaseSolver solver, int q) {
         int cylinders = mechanism.cylinders();
-        if (quantity >= 3 * cylinders) {
-            int bearing = quantity - 3 * cylinders;
-            double x = solver.bearingX(bearing);
-            double y = solver.bearingY(bearing);
-            return Math.sqrt(x * x + y * y);
+        if (q >= 3 * cylinders) {
+            return LoadQuantity.bearing(solver, q - 3 * cylinders);
         }
-        int c = quantity / 3;
-        double force = solver.cylinder(c);
-        return switch (quantity % 3) {
-            case 0 -> force;
-            case 1 -> -force;
-            default -> solver.columnWork(c);
+        return switch (q % 3) {
+            case 0 -> LoadQuantity.push(solver, q / 3);
+            case 1 -> LoadQuantity.pull(solver, q / 3);
+            default -> LoadQuantity.columnWork(solver, q / 3);
         };
     }
 
     private void add(LoadCase load) {
         double[][] values = grid(load);
+        int[] asked = IntStream.range(0, quantities()).filter(q -> twin[q] == q).toArray();
+        Optimum[] tops = new Optimum[quantities()];
+        int[] next = {0};
         new Chunks(threads, done -> {})
-                .<Optimum>inOrder(quantities(), () -> climber(load, values), new OptimumTaker(load));
+                .<Optimum>inOrder(
+                        asked.length, () -> climber(load, values, asked), top -> tops[asked[next[0]++]] = top);
+        CaseSolver solver = new CaseSolver(front, load);
+        for (int q = 0; q < tops.length; q++) {
+            addRow(load, solver, q, tops[twin[q]]);
+        }
+    }
+
+    private void addRow(LoadCase load, CaseSolver solver, int q, Optimum top) {
+        if (top.value() > 0 && solver.solve(top.at())) {
+            if (q < 3 * mechanism.cylinders()) {
+                onCylinders.add(row(load, solver, q / 3, LoadsAnswer.Sense.values()[q % 3], top));
+            } else {
+                onBearings.add(bearing(load, solver, q - 3 * mechanism.cylinders(), top));
+            }
+        }
     }
 
     /** Every quantity at every grid pose. */
@@ -199,6 +228,8 @@ public final class WorstLoads {
 
     private IntFunction<Long> gridWorker(LoadCase load, double[][] values) {
         CaseSolver solver = new CaseSolver(front, load);
+        LoadQuantity[] quantity = new LoadQuantity[values.length];
+        Arrays.setAll(quantity, q -> quantity(solver, q));
         return slice -> {
             long left = 0;
             int first = slice * search.cellsInASlice();
@@ -206,68 +237,42 @@ public final class WorstLoads {
                 boolean stands = solver.solve(search.point(cell));
                 left += stands ? 0 : 1;
                 for (int q = 0; q < values.length; q++) {
-                    values[q][cell] = stands ? quantity(solver, q) : Double.NaN;
+                    values[q][cell] = stands ? quantity[q].value() : Double.NaN;
                 }
             }
             return left;
         };
     }
 
-    private IntFunction<Optimum> climber(LoadCase load, double[][] values) {
+    private IntFunction<Optimum> climber(LoadCase load, double[][] values, int[] asked) {
         CaseSolver solver = new CaseSolver(front, load);
-        return q -> search.findFrom(values[q], at -> solver.solve(at) ? quantity(solver, q) : Double.NaN);
+        return i -> search.findFrom(values[asked[i]], quantity(solver, asked[i]));
     }
 
-    /** Turns the tops, which arrive in the order of the quantities, into rows. */
-    private final class OptimumTaker implements Consumer<Optimum> {
+    private LoadsAnswer.OnCylinder row(LoadCase load, CaseSolver solver, int c, LoadsAnswer.Sense sense, Optimum top) {
+        double force = solver.cylinder(c);
+        CylinderPressure pressure = pressures.get(c);
+        double factor = force > 0 ? columns.get(c).factor(solver.pose().length(c), force) : Double.NaN;
+        return new LoadsAnswer.OnCylinder(
+                c,
+                sense,
+                load.name(),
+                force,
+                force * front.linkage().cylinders().get(c).harderShare(),
+                pressure.cap(force),
+                pressure.rod(force),
+                pressure.reliefMargin(force),
+                factor,
+                top.at());
+    }
 
-        private final LoadCase load;
-        private final CaseSolver solver;
-        private int quantity;
-
-        OptimumTaker(LoadCase load) {
-            this.load = load;
-            solver = new CaseSolver(front, load);
-        }
-
-        @Override
-        public void accept(Optimum top) {
-            int q = quantity++;
-            if (!(top.value() > 0) || !solver.solve(top.at())) {
-                return;
-            }
-            if (q < 3 * mechanism.cylinders()) {
-                onCylinders.add(row(q / 3, LoadsAnswer.Sense.values()[q % 3], top));
-            } else {
-                onBearings.add(bearing(q - 3 * mechanism.cylinders(), top));
-            }
-        }
-
-        private LoadsAnswer.OnCylinder row(int c, LoadsAnswer.Sense sense, Optimum top) {
-            double force = solver.cylinder(c);
-            CylinderPressure pressure = pressures.get(c);
-            double factor = force > 0 ? columns.get(c).factor(solver.pose().length(c), force) : Double.NaN;
-            return new LoadsAnswer.OnCylinder(
-                    c,
-                    sense,
-                    load.name(),
-                    force,
-                    force * front.linkage().cylinders().get(c).harderShare(),
-                    pressure.cap(force),
-                    pressure.rod(force),
-                    pressure.reliefMargin(force),
-                    factor,
-                    top.at());
-        }
-
-        private LoadsAnswer.OnBearing bearing(int b, Optimum top) {
-            int body = mechanism.bearingBody(b);
-            double cos = solver.pose().cos(body);
-            double sin = solver.pose().sin(body);
-            double x = solver.bearingX(b);
-            double y = solver.bearingY(b);
-            return new LoadsAnswer.OnBearing(
-                    b, load.name(), Math.hypot(x, y), cos * x + sin * y, cos * y - sin * x, top.at());
-        }
+    private LoadsAnswer.OnBearing bearing(LoadCase load, CaseSolver solver, int b, Optimum top) {
+        int body = mechanism.bearingBody(b);
+        double cos = solver.pose().cos(body);
+        double sin = solver.pose().sin(body);
+        double x = solver.bearingX(b);
+        double y = solver.bearingY(b);
+        return new LoadsAnswer.OnBearing(
+                b, load.name(), Math.hypot(x, y), cos * x + sin * y, cos * y - sin * x, top.at());
     }
 }

@@ -3,6 +3,7 @@ package org.rodside.study;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.util.Arrays;
 import java.util.SplittableRandom;
 import org.junit.jupiter.api.RepeatedTest;
 import org.junit.jupiter.api.RepetitionInfo;
@@ -27,21 +28,45 @@ class BoxMaximumTest {
                 slope[4][a] -= slope[i][a];
             }
         }
-        Optimum found = BoxMaximum.overAll(3).find(at -> {
-            double least = 100;
-            for (double[] g : slope) {
-                double bent = 0;
-                double piece = 100;
-                for (int a = 0; a < 3; a++) {
-                    piece += g[a] * (at[a] - top[a]);
-                    bent += (at[a] - top[a]) * (at[a] - top[a]);
-                }
-                least = Math.min(least, piece - 3 * bent);
-            }
-            return least;
-        });
+        Optimum found = BoxMaximum.overAll(3).find(new LeastOf(slope, top));
         // the slopes add up to nothing, so no step can raise all of them: the value at the meeting place is the largest
         assertEquals(100, found.value(), PEAK_ABS, "seed " + seed);
+    }
+
+    /** The least of planes bent down a little, all of height 100 at one place. */
+    private static final class LeastOf implements BoxMaximum.Objective {
+
+        private final double[][] slope;
+        private final double[] top;
+        private final double[] piece;
+
+        LeastOf(double[][] slope, double[] top) {
+            this.slope = slope;
+            this.top = top;
+            piece = new double[slope.length];
+        }
+
+        @Override
+        public double at(double[] at) {
+            for (int i = 0; i < piece.length; i++) {
+                piece[i] = 100;
+                for (int a = 0; a < top.length; a++) {
+                    double off = at[a] - top[a];
+                    piece[i] += slope[i][a] * off - 3 * off * off;
+                }
+            }
+            return Arrays.stream(piece).min().orElseThrow();
+        }
+
+        @Override
+        public int pieces() {
+            return piece.length;
+        }
+
+        @Override
+        public void tellPieces(double[] out) {
+            System.arraycopy(piece, 0, out, 0, piece.length);
+        }
     }
 
     /** A sharp tent, half a grid cell wide at its foot, on a broad hill elsewhere that the grid sees as highest. */

@@ -25,7 +25,7 @@ import org.rodside.statics.DenseForceSolver;
 import org.rodside.statics.ForceBuffer;
 import org.rodside.statics.LoadBuffer;
 
-/** Worst loads against the dense solvers, which know no steps, and against a sweep ten times finer than the grid. */
+/** Worst loads against the dense solvers, which know no steps, and against a sweep twenty times finer than the grid. */
 class LoadsSecondWayTest {
 
     /** Rounding of two solvers at poses that are not near a dead centre; no unit. */
@@ -40,8 +40,8 @@ class LoadsSecondWayTest {
     /** A sweep may pass the optimum by no more than rounding; no unit. */
     private static final double SWEEP_REL = 1e-9;
 
-    /** The grid of three cylinders has 41 points an axis. */
-    private static final int TEN_TIMES_FINER = 401;
+    /** The grid of three cylinders has 21 points an axis. */
+    private static final int TWENTY_TIMES_FINER = 401;
 
     private static Front front(String file, String... overrides) {
         return Front.of(LinkageReader.read(Path.of("../linkages", file), List.of(overrides)));
@@ -154,7 +154,7 @@ class LoadsSecondWayTest {
         assertTrue(row.total() <= push * (1 + FORCE_REL) && -row.total() <= pull * (1 + FORCE_REL), row.toString());
     }
 
-    /** All quantities on a plane of the stroke box through a worst pose, ten times finer than the search's own grid. */
+    /** All quantities on a plane of the stroke box through a worst pose, twenty times finer than the search's own grid. */
     @Test
     void aSweepTenTimesFinerThroughAWorstPoseFindsNothingWorse() {
         Front front = front("sallow-22.json");
@@ -173,9 +173,9 @@ class LoadsSecondWayTest {
         List<LoadsAnswer.OnBearing> bearings = answer.bearings().stream()
                 .filter(row -> row.loadCase().equals(load.name()))
                 .toList();
-        for (int i = 0; i < TEN_TIMES_FINER * TEN_TIMES_FINER; i++) {
-            at[0] = i % TEN_TIMES_FINER / (TEN_TIMES_FINER - 1.0);
-            at[1] = i / TEN_TIMES_FINER / (TEN_TIMES_FINER - 1.0);
+        for (int i = 0; i < TWENTY_TIMES_FINER * TWENTY_TIMES_FINER; i++) {
+            at[0] = i % TWENTY_TIMES_FINER / (TWENTY_TIMES_FINER - 1.0);
+            at[1] = i / TWENTY_TIMES_FINER / (TWENTY_TIMES_FINER - 1.0);
             if (solver.solve(at)) {
                 rows.forEach(row -> notWorse(row, solver));
                 for (LoadsAnswer.OnBearing row : bearings) {
