@@ -24,7 +24,7 @@ final class EnvelopeCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         Front front = Front.of(file.read(common));
-        EnvelopeReport report = new EnvelopeReport(front, WorkingRange.of(front), common.units());
+        EnvelopeReport report = new EnvelopeReport(front, WorkingRange.of(front, common.threads()), common.units());
         common.folder(file.path()).ifPresent(report::files);
         common.tell(front, report::json, report::text);
         return ExitStatus.DONE;

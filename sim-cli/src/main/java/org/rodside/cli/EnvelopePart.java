@@ -14,7 +14,9 @@ final class EnvelopePart implements StudyPart {
     @Override
     public Told tell(Desk desk) {
         EnvelopeReport report = new EnvelopeReport(
-                desk.front(), WorkingRange.of(desk.front()), desk.common().units());
+                desk.front(),
+                WorkingRange.of(desk.front(), desk.common().threads()),
+                desk.common().units());
         desk.folder().ifPresent(folder -> {
             report.files(folder);
             report.section(desk.page());

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import org.apache.commons.math3.analysis.solvers.BrentSolver;
 
 /**
  * On a face where two strokes move: the curves along which both carry a place along one line. Found on a grid of squares whose sides are
@@ -12,8 +13,13 @@ import java.util.Map;
 final class FaceCurve {
 
     private static final int SQUARES = 40;
-    private static final int BISECTIONS = 46;
 
+    /** Finds where a sine vanishes, to this share of the side of a square. */
+    private static final double ROOT = 1e-14;
+
+    private static final int EVALUATIONS = 200;
+
+    private final BrentSolver roots = new BrentSolver(ROOT, ROOT, 0);
     private final FrontSolver solver;
     private final Place place;
     private final double[] at;
@@ -88,25 +94,22 @@ final class FaceCurve {
                     id,
                     side -> between(
                             new double[] {i / (double) SQUARES, j / (double) SQUARES},
-                            new double[] {k / (double) SQUARES, l / (double) SQUARES},
-                            a));
+                            new double[] {k / (double) SQUARES, l / (double) SQUARES}));
         }
     }
 
-    /** Where the sine changes sign between two places of the face, by halving. */
-    private double[] between(double[] from, double[] to, double atFrom) {
-        double low = 0;
-        double high = 1;
-        for (int round = 0; round < BISECTIONS; round++) {
-            double middle = 0.5 * (low + high);
-            double here = sine(from[0] + middle * (to[0] - from[0]), from[1] + middle * (to[1] - from[1]));
-            if (here * atFrom > 0) {
-                low = middle;
-            } else {
-                high = middle;
-            }
-        }
-        return new double[] {from[0] + high * (to[0] - from[0]), from[1] + high * (to[1] - from[1])};
+    /** Where the sine changes sign between two places of the face. */
+    private double[] between(double[] from, double[] to) {
+        double share = roots.solve(
+                EVALUATIONS,
+                t -> {
+                    double here = sine(from[0] + t * (to[0] - from[0]), from[1] + t * (to[1] - from[1]));
+                    // a pose between that does not assemble ends the search on either side of it
+                    return Double.isNaN(here) ? 0 : here;
+                },
+                0,
+                1);
+        return new double[] {from[0] + share * (to[0] - from[0]), from[1] + share * (to[1] - from[1])};
     }
 
     private void walk(int start, LimitCurves.Taker taker) {
@@ -141,7 +144,7 @@ final class FaceCurve {
         if (!(atLeft * atRight < 0)) {
             return Math.abs(sine(s, t)) < 1e-12 ? pose(new double[] {s, t}) : null;
         }
-        return pose(between(left, right, atLeft));
+        return pose(between(left, right));
     }
 
     private static double inside(double fraction) {

@@ -1,16 +1,35 @@
 package org.rodside.study;
 
 import java.util.Arrays;
-import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import org.rodside.kinematics.PoseBuffer;
 import org.rodside.kinematics.PoseSolver;
 import org.rodside.model.Point;
 import org.rodside.model.Tool;
 
-/** Named dimensions of the working range that belong to one pose each (docs/working-range.md; theory R1). */
+/** Named dimensions of the working range that belong to one pose each (docs/working-range.md; theory R1). Owns its scratch; one per
+ * thread. */
 final class RangeDimensions {
+
+    /** Names, in the order of the answer. */
+    static final List<String> NAMES = List.of(
+            "reach",
+            "ground_reach",
+            "depth",
+            "cutting_height",
+            "dump_height",
+            "dump_height_min",
+            "level_depth",
+            "wall_depth",
+            "swing_radius",
+            "hook_height",
+            "hook_reach");
+
+    /** Of these the smallest is told, of all others the largest. */
+    private static final Set<String> SMALLEST = Set.of("dump_height_min", "swing_radius");
 
     /** Below ground counts this many times over while the swing radius is sought: more than any radius can gain by it. */
     private static final double GROUND_PENALTY = 100;
@@ -25,8 +44,6 @@ final class RangeDimensions {
     private final Place hook;
     private final Optional<Place> heel;
     private final double[] free;
-    private final Map<String, Double> values = new LinkedHashMap<>();
-    private final Map<String, double[]> poses = new LinkedHashMap<>();
 
     RangeDimensions(Front front) {
         this.front = front;
@@ -40,33 +57,24 @@ final class RangeDimensions {
         Arrays.fill(free, Double.NaN);
     }
 
-    Map<String, Double> values() {
-        return values;
-    }
-
-    Map<String, double[]> poses() {
-        return poses;
-    }
-
-    void find() {
-        put("reach", 1, best(() -> tip.x(pose)));
-        put("ground_reach", 1, onLine(() -> tip.y(pose), () -> tip.x(pose), free));
-        put("depth", 1, best(() -> -tip.y(pose)));
-        put("cutting_height", 1, best(() -> tip.y(pose)));
-        put("dump_height", 1, onLine(this::tipBelowHook, () -> tip.y(pose), free));
-        put("dump_height_min", -1, lowestDump());
-        put("level_depth", 1, new Optimum(Double.NaN, free));
-        put("wall_depth", 1, wall());
-        put("swing_radius", -1, swing());
-        put("hook_height", 1, best(() -> hook.y(pose)));
-        put("hook_reach", 1, best(() -> hook.x(pose)));
-    }
-
-    private void put(String name, int sign, Optimum optimum) {
-        values.put(name, sign * optimum.value());
-        if (optimum.exists()) {
-            poses.put(name, optimum.at());
-        }
+    /** The pose of a dimension and its length, in m; without a value where the linkage has none. */
+    Optimum find(String name) {
+        Optimum found = switch (name) {
+            case "reach" -> best(() -> tip.x(pose));
+            case "ground_reach" -> onLine(() -> tip.y(pose), () -> tip.x(pose), free);
+            case "depth" -> best(() -> -tip.y(pose));
+            case "cutting_height" -> best(() -> tip.y(pose));
+            case "dump_height" -> onLine(this::tipBelowHook, () -> tip.y(pose), free);
+            case "dump_height_min" -> lowestDump();
+            // belongs to no one pose: found from the outline
+            case "level_depth" -> new Optimum(Double.NaN, free);
+            case "wall_depth" -> wall();
+            case "swing_radius" -> swing();
+            case "hook_height" -> best(() -> hook.y(pose));
+            case "hook_reach" -> best(() -> hook.x(pose));
+            default -> throw new IllegalArgumentException(name);
+        };
+        return SMALLEST.contains(name) ? new Optimum(-found.value(), found.at()) : found;
     }
 
     /** A length read off the pose the solver stands at; in m. */

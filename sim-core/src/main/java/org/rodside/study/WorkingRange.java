@@ -1,8 +1,11 @@
 package org.rodside.study;
 
+import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.function.Consumer;
+import java.util.function.IntFunction;
 
 /** Working range of the tip and the hook: named dimensions and the true outline (docs/working-range.md). */
 public final class WorkingRange {
@@ -12,14 +15,45 @@ public final class WorkingRange {
 
     private WorkingRange() {}
 
-    /** Finds dimensions and outline of a front; an error where the linkage has no tool. */
-    public static RangeAnswer of(Front front) {
+    /** Finds dimensions and outline of a front, the same for any number of threads; an error where the linkage has no tool. */
+    public static RangeAnswer of(Front front, int threads) {
         front.tool();
-        RangeDimensions found = new RangeDimensions(front);
-        found.find();
-        List<double[][]> outline = Outline.of(front);
-        Map<String, Double> dimensions = new LinkedHashMap<>(found.values());
+        List<String> names = RangeDimensions.NAMES;
+        List<double[][]> outline = new ArrayList<>();
+        Map<String, Double> dimensions = new LinkedHashMap<>();
+        Map<String, double[]> poses = new LinkedHashMap<>();
+        // the outline first, for it takes longest
+        new Chunks(threads, done -> {})
+                .<Optimum>inOrder(1 + names.size(), () -> worker(front, outline), new Consumer<>() {
+                    private int next;
+
+                    @Override
+                    public void accept(Optimum found) {
+                        if (next > 0) {
+                            put(names.get(next - 1), found, dimensions, poses);
+                        }
+                        next++;
+                    }
+                });
         dimensions.put("level_depth", -Outline.deepestLevel(outline, LEVEL_FLOOR));
-        return new RangeAnswer(dimensions, found.poses(), outline);
+        return new RangeAnswer(dimensions, poses, outline);
+    }
+
+    private static IntFunction<Optimum> worker(Front front, List<double[][]> outline) {
+        RangeDimensions range = new RangeDimensions(front);
+        return piece -> {
+            if (piece == 0) {
+                outline.addAll(Outline.of(front));
+                return null;
+            }
+            return range.find(RangeDimensions.NAMES.get(piece - 1));
+        };
+    }
+
+    private static void put(String name, Optimum found, Map<String, Double> dimensions, Map<String, double[]> poses) {
+        dimensions.put(name, found.value());
+        if (found.exists()) {
+            poses.put(name, found.at());
+        }
     }
 }

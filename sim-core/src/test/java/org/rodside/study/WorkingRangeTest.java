@@ -32,7 +32,7 @@ class WorkingRangeTest {
             })
     void outlineHoldsEveryPoseAndTouchesItsExtremes(String file) {
         Front front = front(file);
-        RangeAnswer range = WorkingRange.of(front);
+        RangeAnswer range = WorkingRange.of(front, 2);
         assertTrue(!range.outline().isEmpty(), "closed");
         double[][] ring = range.outline().get(0);
         assertTrue(Outline.area(ring) > 0, "anticlockwise");
@@ -62,7 +62,7 @@ class WorkingRangeTest {
     @ValueSource(strings = {"sallow-22.json", "fenbrook-backhoe.json", "cullen-bank-shovel.json"})
     void theLineSeparates(String file) {
         Front front = front(file);
-        double[][] ring = WorkingRange.of(front).outline().get(0);
+        double[][] ring = WorkingRange.of(front, 2).outline().get(0);
         ReachTest reach = new ReachTest(new FrontSolver(front), front.tip());
         double[] middle = new double[front.mechanism().cylinders()];
         Arrays.fill(middle, 0.5);
@@ -88,7 +88,7 @@ class WorkingRangeTest {
     @ValueSource(strings = {"sallow-22.json", "fenbrook-backhoe.json"})
     void noPoseBeatsADimension(String file) {
         Front front = front(file);
-        RangeAnswer range = WorkingRange.of(front);
+        RangeAnswer range = WorkingRange.of(front, 2);
         FrontSolver solver = new FrontSolver(front);
         SplittableRandom random = new SplittableRandom(9);
         Place tip = front.tip();
@@ -138,8 +138,8 @@ class WorkingRangeTest {
         Front same = Front.of(LinkageReader.read(
                 Path.of("../linkages/sallow-22.json"),
                 List.of("units.length=\"mm\"", "name=\"Other\"", "cylinders.boom.mass=10")));
-        RangeAnswer one = WorkingRange.of(front);
-        RangeAnswer two = WorkingRange.of(same);
+        RangeAnswer one = WorkingRange.of(front, 2);
+        RangeAnswer two = WorkingRange.of(same, 1);
         one.dimensions()
                 .forEach((name, value) -> assertEquals(value, two.dimensions().get(name), 0.0, name));
     }
