@@ -1,5 +1,7 @@
 package org.rodside.study;
 
+import java.util.Arrays;
+
 /** Largest forces met in a part of a sweep; the first of equals. Parts are added in order. Not thread-safe. */
 final class DigBest {
 
@@ -14,19 +16,38 @@ final class DigBest {
 
     /** Takes in one line, whose first pose has the given number. */
     void add(DigRun run, long first) {
-        for (int i = 0; i < run.curl.length; i++) {
-            double force = run.curl[i];
-            assembled += force == force ? 1 : 0;
-            if (force > curl && force < UNLIMITED) {
-                curl = force;
-                curlPose = first + i;
-            }
-            double other = run.crowd[i];
-            if (other > crowd && other < UNLIMITED) {
-                crowd = other;
-                crowdPose = first + i;
+        double mostCurl = most(run.curl);
+        double mostCrowd = most(run.crowd);
+        assembled += Double.isNaN(mostCurl) ? assembled(run.curl) : run.curl.length;
+        if (!(mostCurl <= curl)) {
+            for (int i = 0; i < run.curl.length; i++) {
+                if (run.curl[i] > curl && run.curl[i] < UNLIMITED) {
+                    curl = run.curl[i];
+                    curlPose = first + i;
+                }
             }
         }
+        if (!(mostCrowd <= crowd)) {
+            for (int i = 0; i < run.crowd.length; i++) {
+                if (run.crowd[i] > crowd && run.crowd[i] < UNLIMITED) {
+                    crowd = run.crowd[i];
+                    crowdPose = first + i;
+                }
+            }
+        }
+    }
+
+    /** The largest of all, NaN where one is: few lines hold a new best, and this loop has no branches. */
+    private static double most(double[] forces) {
+        double most = Double.NEGATIVE_INFINITY;
+        for (int i = 0; i < forces.length; i++) {
+            most = Math.max(most, forces[i]);
+        }
+        return most;
+    }
+
+    private static long assembled(double[] forces) {
+        return Arrays.stream(forces).filter(force -> !Double.isNaN(force)).count();
     }
 
     /** Takes in a later part. */

@@ -14,9 +14,6 @@ import org.rodside.model.Machine;
  */
 final class StageDigLine implements DigLine {
 
-    /** Stands for no load at all where a reciprocal is taken; far below any load over room in 1/N. */
-    private static final double NO_LOAD = 1e-300;
-
     private final StageSweep sweep;
     private final LineBuffer line;
     private final DutyLine curl;
@@ -32,12 +29,14 @@ final class StageDigLine implements DigLine {
     private final double[] drivingPush;
     private final double[] drivingPull;
     private final double[] fixed;
-    private final double[] unit1;
-    private final double[] unit2;
-    private final double[] room1;
-    private final double[] room2;
-    private final double[] load1;
-    private final double[] load2;
+    private final double[] unit;
+    private final double[] over;
+    private final double[] places;
+    private final double[] groundRoom;
+    private final double[] up;
+    private final double[] other;
+    private final LimitLine limits1;
+    private final LimitLine limits2;
 
     StageDigLine(StageSweep sweep, boolean ideal) {
         this.sweep = sweep;
@@ -59,12 +58,14 @@ final class StageDigLine implements DigLine {
         drivingPull = new double[n];
         capacities(made);
         fixed = new double[steps];
-        unit1 = new double[steps];
-        unit2 = new double[steps];
-        room1 = new double[steps];
-        room2 = new double[steps];
-        load1 = new double[steps];
-        load2 = new double[steps];
+        unit = new double[steps];
+        over = new double[steps];
+        places = new double[steps];
+        groundRoom = new double[steps];
+        up = new double[steps];
+        other = new double[steps];
+        limits1 = new LimitLine(steps);
+        limits2 = new LimitLine(steps);
     }
 
     private void capacities(Front made) {
@@ -89,28 +90,37 @@ final class StageDigLine implements DigLine {
     public void forces(int[] outer, DigRun out) {
         begin(outer);
         DutyLine second = crowd == null ? curl : crowd;
-        ground(curl, room1, load1);
-        ground(second, room2, load2);
+        if (stability) {
+            groundRooms();
+            ground(curl, limits1);
+            ground(second, limits2);
+        } else {
+            limits1.begin();
+            limits2.begin();
+        }
         for (int k = 0; k < sweep.size(); k++) {
             weights(k);
-            unit(k, curl, unit1);
-            unit(k, second, unit2);
-            boolean drives1 = k == curl.stage();
-            boolean drives2 = k == second.stage();
-            if (drives1 == drives2) {
-                double most = drives1 ? drivingPush[k] : push[k];
-                meetBoth(most, drives1 ? drivingPull[k] : pull[k]);
-            } else {
-                meet(drives1 ? drivingPush[k] : push[k], drives1 ? drivingPull[k] : pull[k], unit1, room1, load1);
-                meet(drives2 ? drivingPush[k] : push[k], drives2 ? drivingPull[k] : pull[k], unit2, room2, load2);
-            }
+            unit(k, curl, unit);
+            limits1.meet(fixed, unit, push(k, curl), pull(k, curl));
+            unit(k, second, unit);
+            limits2.meet(fixed, unit, push(k, second), pull(k, second));
         }
-        largest(room1, load1, out.curl);
+        limits1.largest(out.curl);
         if (crowd == null) {
             Arrays.fill(out.crowd, Double.NaN);
         } else {
-            largest(room2, load2, out.crowd);
+            limits2.largest(out.crowd);
         }
+    }
+
+    /** Most push of a stage's cylinder; in N. */
+    private double push(int k, DutyLine duty) {
+        return k == duty.stage() ? drivingPush[k] : push[k];
+    }
+
+    /** Most pull of a stage's cylinder; in N. */
+    private double pull(int k, DutyLine duty) {
+        return k == duty.stage() ? drivingPull[k] : pull[k];
     }
 
     /** Weight forces of a stage's cylinder along the line; in N. */
@@ -156,80 +166,51 @@ final class StageDigLine implements DigLine {
         }
     }
 
-    /**
-     * Tipping and slip: load over room in 1/N, and room as a number above zero where neither is broken. Each pair of
-     * opposite limits shares one division.
-     */
-    private void ground(DutyLine duty, double[] room, double[] load) {
-        if (!stability) {
-            Arrays.fill(room, 1);
-            Arrays.fill(load, NO_LOAD);
-            return;
-        }
-        double c = line.cos();
-        double s = line.sin();
-        double[] sx = sweep.last().momentX;
-        double[] sy = sweep.last().momentY;
+    /** Rooms of tipping over the front and over the rear line, and their product: the same for both duties. */
+    private void groundRooms() {
         double down = Linkage.GRAVITY;
-        double byX = -down * c;
-        double byY = down * s;
+        combine(0, -down * line.cos(), down * line.sin(), sweep.last().momentX, sweep.last().momentY, places);
         double atFront = line.momentWithoutLast + front * line.totalWeight;
         double atRear = -line.momentWithoutLast - rear * line.totalWeight;
+        for (int i = 0; i < places.length; i++) {
+            groundRoom[i] = (atFront + places[i]) * (atRear - places[i]);
+        }
+    }
+
+    /** Meets tipping and slip. */
+    private void ground(DutyLine duty, LimitLine limits) {
+        double c = line.cos();
+        double s = line.sin();
         double offX = c * line.x() + s * line.y();
         double offY = c * line.y() - s * line.x();
-        double slip = Double.isNaN(grip) ? 0 : 1 / (grip * line.totalWeight);
-        double hold = Double.isNaN(grip) ? 0 : grip;
-        for (int i = 0; i < room.length; i++) {
-            double ux = duty.ux[i];
-            double uy = duty.uy[i];
-            double up = s * ux + c * uy;
-            double forward = c * ux - s * uy;
-            double moment = duty.arm[i] + offX * uy - offY * ux;
-            double places = byX * sx[i] + byY * sy[i];
-            double roomFront = atFront + places;
-            double roomRear = atRear - places;
-            double product = roomFront * roomRear;
-            double toFront = moment - front * up;
-            double toRear = rear * up - moment;
-            double tip = Math.max(toFront * roomRear, toRear * roomFront) / product;
-            load[i] = Math.max(Math.max(tip, slip * (Math.abs(forward) - hold * up)), NO_LOAD);
-            room[i] = product;
+        combine(0, s, c, duty.ux, duty.uy, up);
+        combine(0, -offY, offX, duty.ux, duty.uy, other);
+        add(duty.arm, other);
+        tipping();
+        limits.begin(groundRoom, over);
+        if (!Double.isNaN(grip)) {
+            combine(0, c, -s, duty.ux, duty.uy, other);
+            double perGrip = 1 / (grip * line.totalWeight);
+            for (int i = 0; i < over.length; i++) {
+                over[i] = perGrip * (Math.abs(other[i]) - grip * up[i]);
+            }
+            limits.meet(over);
         }
     }
 
-    private void meetBoth(double most, double least) {
-        double[] a = fixed;
-        double half = 0.5 * (least - most);
-        double sum = 0.5 * (most + least);
-        for (int i = 0; i < a.length; i++) {
-            double product = (most - a[i]) * (least + a[i]);
-            double inverse = 1 / product;
-            double q1 = inverse * (unit1[i] * (half + a[i]) + Math.abs(unit1[i]) * sum);
-            double q2 = inverse * (unit2[i] * (half + a[i]) + Math.abs(unit2[i]) * sum);
-            load1[i] = Math.max(load1[i], q1);
-            load2[i] = Math.max(load2[i], q2);
-            room1[i] = Math.min(room1[i], product);
-            room2[i] = Math.min(room2[i], product);
+    private static void add(double[] what, double[] to) {
+        for (int i = 0; i < to.length; i++) {
+            to[i] += what[i];
         }
     }
 
-    private void meet(double most, double least, double[] unit, double[] room, double[] load) {
-        double[] a = fixed;
-        double half = 0.5 * (least - most);
-        double sum = 0.5 * (most + least);
-        for (int i = 0; i < a.length; i++) {
-            double product = (most - a[i]) * (least + a[i]);
-            double q = (unit[i] * (half + a[i]) + Math.abs(unit[i]) * sum) / product;
-            load[i] = Math.max(load[i], q);
-            room[i] = Math.min(room[i], product);
-        }
-    }
-
-    /** Largest force: zero where a limit is broken without any, huge ({@link DigBest#UNLIMITED}) where nothing limits it. */
-    private static void largest(double[] room, double[] load, double[] out) {
-        for (int i = 0; i < out.length; i++) {
-            double stands = Math.min(1, Math.max(0, room[i] * 1e300));
-            out[i] = stands / load[i];
+    private void tipping() {
+        double atFront = line.momentWithoutLast + front * line.totalWeight;
+        double atRear = -line.momentWithoutLast - rear * line.totalWeight;
+        for (int i = 0; i < over.length; i++) {
+            double toFront = other[i] - front * up[i];
+            double toRear = rear * up[i] - other[i];
+            over[i] = Math.max(toFront * (atRear - places[i]), toRear * (atFront + places[i]));
         }
     }
 
@@ -259,13 +240,12 @@ final class StageDigLine implements DigLine {
         for (int cylinder = 0; cylinder < sweep.size(); cylinder++) {
             int k = sweep.stageOf(cylinder);
             weights(k);
-            unit(k, duty, unit1);
-            boolean drives = k == duty.stage();
-            double most = drives ? drivingPush[k] : push[k];
-            double least = drives ? drivingPull[k] : pull[k];
+            unit(k, duty, unit);
+            double most = push(k, duty);
+            double least = pull(k, duty);
             for (int i = 0; i < steps; i++) {
-                meetOne(2 * cylinder, most - fixed[i], unit1[i], i, force, limit);
-                meetOne(2 * cylinder + 1, least + fixed[i], -unit1[i], i, force, limit);
+                meetOne(2 * cylinder, most - fixed[i], unit[i], i, force, limit);
+                meetOne(2 * cylinder + 1, least + fixed[i], -unit[i], i, force, limit);
             }
         }
         if (stability) {
