@@ -9,7 +9,7 @@ import java.util.SplittableRandom;
 /**
  * Largest value of a function of the stroke fractions over the whole stroke box (theory W1): a grid finds the hills; the highest of
  * them, the corners of the box and some grid points drawn at random are climbed along their ridges; the strokes are scanned one by one
- * through the best place, for peaks too narrow for the grid; a pattern search finds the last digits. The function may have
+ * through the best place, for peaks too narrow for the grid. The function may have
  * kinks (it often is the least of several limits) and may have no value (NaN) at some poses. The same call always gives the
  * same bits.
  */
@@ -133,7 +133,7 @@ public final class BoxMaximum {
         for (int axis : free) {
             best = scan(objective, ridge, best, axis);
         }
-        return new PatternSearch(objective, free).lastDigits(ridge.top(best));
+        return ridge.top(best);
     }
 
     /** Climbs from a given pose only. */
@@ -142,7 +142,7 @@ public final class BoxMaximum {
         if (free.length == 0 || !from.exists()) {
             return from;
         }
-        return new PatternSearch(objective, free).lastDigits(new RidgeClimber(objective, free).top(from));
+        return new RidgeClimber(objective, free).top(from);
     }
 
     /** Number of grid points. */

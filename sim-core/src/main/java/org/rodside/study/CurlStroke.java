@@ -1,6 +1,11 @@
 package org.rodside.study;
 
 import java.util.Arrays;
+import org.apache.commons.math3.optim.MaxEval;
+import org.apache.commons.math3.optim.nonlinear.scalar.GoalType;
+import org.apache.commons.math3.optim.univariate.BrentOptimizer;
+import org.apache.commons.math3.optim.univariate.SearchInterval;
+import org.apache.commons.math3.optim.univariate.UnivariateObjectiveFunction;
 
 /**
  * The curl stroke at which rated forces are taken (theory S7): where the curl cylinder alone gives the largest tool force.
@@ -9,14 +14,23 @@ import java.util.Arrays;
  */
 final class CurlStroke {
 
-    /** Forces that differ by less than this share are the same; no unit. */
-    private static final double SAME = 1e-9;
+    /** Forces that differ by less than this share are the same, ten times what the search leaves; no unit. */
+    private static final double SAME = 1e-10;
 
     /** Beside the best stroke by so much, a force that has one best stroke has fallen by far more than that; share of a stroke. */
     private static final double BESIDE = 1e-3;
 
     /** Ends of a range of best strokes are found to this; share of a stroke. */
     private static final double END = 1e-6;
+
+    /** The search has the stroke to this; share of a stroke. */
+    private static final double NEAR = 1e-4;
+
+    /** As close as the rounding of a smooth force lets its best stroke be told. */
+    private static final double RELATIVE = 1e-9;
+
+    private static final double ABSOLUTE = 1e-10;
+    private static final int EVALUATIONS = 200;
 
     private final int curl;
     private final int cylinders;
@@ -40,7 +54,25 @@ final class CurlStroke {
         double stroke = best.at()[curl];
         double low = end(stroke, 0, best.value());
         double high = end(stroke, 1, best.value());
-        return high - low <= BESIDE ? stroke : bestOf(low, high);
+        return high - low <= BESIDE ? polished(best) : bestOf(low, high);
+    }
+
+    /** The last digits of the stroke: rated forces change with it in the first order. */
+    private double polished(Optimum best) {
+        double[] at = best.at().clone();
+        double found = new BrentOptimizer(RELATIVE, ABSOLUTE)
+                .optimize(
+                        new MaxEval(EVALUATIONS),
+                        GoalType.MAXIMIZE,
+                        new SearchInterval(Math.max(0, at[curl] - NEAR), Math.min(1, at[curl] + NEAR), at[curl]),
+                        new UnivariateObjectiveFunction(stroke -> {
+                            at[curl] = stroke;
+                            double force = alone(at);
+                            return Double.isNaN(force) ? 0 : force;
+                        }))
+                .getPoint();
+        at[curl] = found;
+        return alone(at) >= best.value() ? found : best.at()[curl];
     }
 
     private double alone(double[] fractions) {

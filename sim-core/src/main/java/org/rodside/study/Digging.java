@@ -8,6 +8,9 @@ import org.rodside.model.InputException;
 /** Digging forces: at one pose, and rated as SAE J1179 (at the lip: ISO 6015) has them (theory S6, S7). */
 public final class Digging {
 
+    /** Limits that meet on a ridge do so within this share of the force, the last in order is named; no unit. */
+    private static final double RIDGE = 1e-7;
+
     private final Front front;
     private final FrontSolver solver;
     private final Edge edge;
@@ -66,6 +69,6 @@ public final class Digging {
             throw new InputException("cylinders: no pose of the stroke box gives a digging force; see 'check'");
         }
         double force = dig.force(best.at());
-        return new DigForce(force, dig.limits().name(dig.governing()), best.at());
+        return new DigForce(force, dig.limits().name(dig.limits().lastMet(RIDGE)), best.at());
     }
 }

@@ -32,6 +32,9 @@ final class RidgeClimber {
     /** Step of a slope: its square against the box, and rounding over it, both stay near 1e-10; share of a stroke. */
     private static final double SLOPE_STEP = 1e-6;
 
+    /** Step where a bend is taken too: a second difference wants more room above rounding; share of a stroke. */
+    private static final double BEND_STEP = 1e-5;
+
     /** A climb ends where the planes promise no more than this share; no unit. */
     private static final double PROMISE = 1e-11;
 
@@ -48,6 +51,8 @@ final class RidgeClimber {
     private final int n;
     private final TangentPlanes planes;
     private final double[] width;
+    private final double[] trusted;
+    private final double[] box;
     private final double[] centre;
     private final double[] place;
     private final double[] pieces;
@@ -68,6 +73,8 @@ final class RidgeClimber {
         n = free.length;
         planes = new TangentPlanes(n);
         width = new double[n];
+        trusted = new double[n];
+        box = new double[n];
         centre = new double[n];
         place = new double[n];
         pieces = new double[objective.pieces()];
@@ -106,7 +113,7 @@ final class RidgeClimber {
     private boolean step() {
         while (Arrays.stream(width).max().orElseThrow() > LAST) {
             layPlanes(here, pieces);
-            if (!planes.highest(width, place)) {
+            if (!planes.highest(box(), place)) {
                 scale(LEAST_LEFT);
                 continue;
             }
@@ -130,6 +137,11 @@ final class RidgeClimber {
             scale(Math.max(LEAST_LEFT, Math.min(MOST_LEFT, promised / (2 * (promised - gain)))));
         }
         return false;
+    }
+
+    private double[] box() {
+        Arrays.setAll(box, a -> Math.min(width[a], trusted[a]));
+        return box;
     }
 
     private boolean hopeless(double toBeat) {
@@ -167,7 +179,7 @@ final class RidgeClimber {
         }
         tellPieces(reached, bent);
         layPlanes(trial, bent);
-        double again = planes.highest(width, place) ? tryPlace() : gain;
+        double again = planes.highest(box(), place) ? tryPlace() : gain;
         return Double.isNaN(again) ? gain : again;
     }
 
@@ -197,30 +209,57 @@ final class RidgeClimber {
         return out;
     }
 
-    /** All pieces at the present place and their slopes. */
+    /** All pieces at the present place, their slopes, and how far they are to be trusted. */
     private void takeSlopes() {
         tellPieces(objective.at(here), pieces);
         System.arraycopy(here, 0, trial, 0, here.length);
+        Arrays.fill(trusted, WIDEST);
         for (int a = 0; a < n; a++) {
-            double step = here[free[a]] + SLOPE_STEP > 1 ? -SLOPE_STEP : SLOPE_STEP;
+            double size = pieces.length == 1 ? BEND_STEP : SLOPE_STEP;
+            double step = here[free[a]] + size > 1 ? -size : size;
             takeSlope(a, step);
             if (Double.isNaN(reached)) {
-                takeSlope(a, -step);
+                step = -step;
+                takeSlope(a, step);
+            }
+            if (pieces.length == 1) {
+                takeBend(a, step);
             }
         }
     }
 
-    /** Slopes along one axis by a small step; NaN where the pose beside does not stand. */
-    private void takeSlope(int a, double by) {
+    private double beside(int a, double by) {
         int axis = free[a];
         trial[axis] = Math.max(0, Math.min(1, here[axis] + by));
         reached = objective.at(trial);
-        tellPieces(reached, bent);
         double step = trial[axis] - here[axis];
+        trial[axis] = here[axis];
+        return step;
+    }
+
+    /** Slopes along one axis by a small step; NaN where the pose beside does not stand. */
+    private void takeSlope(int a, double by) {
+        double step = beside(a, by);
+        tellPieces(reached, bent);
         for (int p = 0; p < slopes.length; p++) {
             slopes[p][a] = Double.isNaN(reached) ? Double.NaN : (bent[p] - pieces[p]) / step;
         }
-        trial[axis] = here[axis];
+    }
+
+    /**
+     * A smooth function bends: the parabola through a second pose beside, on the other side where there is room, gives its
+     * slope to the second order and where its top lies along the axis.
+     */
+    private void takeBend(int a, double first) {
+        double end = here[free[a]] - first;
+        double second = beside(a, end >= 0 && end <= 1 ? -first : 2 * first);
+        double rise = (reached - pieces[0]) / second;
+        double bend = 2 * (rise - slopes[0][a]) / (second - first);
+        double slope = slopes[0][a] - first * bend / 2;
+        if (bend < 0) {
+            trusted[a] = Math.min(WIDEST, -Math.abs(slope) / bend);
+        }
+        slopes[0][a] = Double.isNaN(slope) ? slopes[0][a] : slope;
     }
 
     private void tellPieces(double whole, double[] out) {

@@ -69,25 +69,22 @@ class BoxMaximumTest {
         }
     }
 
-    /** A sharp tent, half a grid cell wide at its foot, on a broad hill elsewhere that the grid sees as highest. */
+    /** A ridge a third of a grid cell wide along one stroke, beside a broad hill that the grid sees as highest. */
     @Test
-    void narrowPeakBesideABroadHill() {
+    void narrowAlongOneStrokeBesideABroadHill() {
         double cell = 1.0 / 20;
-        double[] tent = {10.5 * cell, 4.4 * cell, 15.6 * cell};
+        double ridge = 15.5 * cell;
         Optimum found = BoxMaximum.overAll(3).find(at -> {
-            double broad = 1;
-            double far = 0;
-            for (int a = 0; a < 3; a++) {
-                broad -= 0.5 * (at[a] - 0.2) * (at[a] - 0.2);
-                far = Math.max(far, Math.abs(at[a] - tent[a]));
-            }
-            return broad + Math.max(0, 2 - 2 * far / (0.75 * cell));
+            double broad = 1 - square(at[0] - 0.2) - square(at[1] - 0.3);
+            return broad - 0.01 * square(at[2] - 0.2) + 2 * Math.exp(-square((at[2] - ridge) / (cell / 6)));
         });
-        double base = 1;
-        for (double a : tent) {
-            base -= 0.5 * (a - 0.2) * (a - 0.2);
-        }
-        assertEquals(base + 2, found.value(), PEAK_ABS);
+        // the slope of the broad hill moves the top by less than a thousandth of the ridge's width
+        assertEquals(3 - 0.01 * square(ridge - 0.2), found.value(), PEAK_ABS);
+        assertEquals(ridge, found.at()[2], 1e-3 * cell);
+    }
+
+    private static double square(double x) {
+        return x * x;
     }
 
     /** One fixed axis stays where it is, one free axis has its peak at the border; no value on half of the box. */
