@@ -51,4 +51,30 @@ public record Cylinder(
     public double extended() {
         return retracted + stroke;
     }
+
+    /**
+     * The same cylinder with other ends of its stroke.
+     *
+     * @param shortest pin-to-pin length at the near end; in m
+     * @param travel way to the far end; in m
+     */
+    public Cylinder between(double shortest, double travel) {
+        return new Cylinder(
+                name,
+                capPin,
+                rodPin,
+                count,
+                bore,
+                rod,
+                shortest,
+                travel,
+                working,
+                relief,
+                back,
+                friction,
+                mass,
+                harderShare,
+                tube,
+                yield);
+    }
 }

@@ -8,7 +8,8 @@ import java.util.Map;
 /**
  * Boundary of what the tip reaches (theory R2, R3): limit curves are cut where they cross; a piece with reachable ground on one
  * side only bounds; such pieces, turned so that the reachable side is on the left, are joined into rings. Good to a fraction of a
- * millimetre where every pose of the stroke box assembles; a bound made by poses that do not assemble is not traced.
+ * millimetre where every pose of the stroke box assembles; a bound made by poses that do not assemble inside the box is
+ * not traced ({@link StrokeTrim} takes most of them away).
  */
 public final class Outline {
 

@@ -37,6 +37,7 @@ final class RangeDimensions {
     /** A pose stands above the ground within; in m. */
     private static final double ABOVE = 1e-6;
 
+    private final StrokeTrim trim;
     private final Front front;
     private final FrontSolver solver;
     private final PoseBuffer pose;
@@ -45,8 +46,12 @@ final class RangeDimensions {
     private final Optional<Place> heel;
     private final double[] free;
 
-    RangeDimensions(Front front) {
-        this.front = front;
+    /**
+     * @param trim the front, its strokes trimmed to where it assembles
+     */
+    RangeDimensions(StrokeTrim trim) {
+        this.trim = trim;
+        front = trim.front();
         solver = new FrontSolver(front);
         pose = solver.pose();
         tip = front.tip();
@@ -74,7 +79,8 @@ final class RangeDimensions {
             case "hook_reach" -> best(() -> hook.x(pose));
             default -> throw new IllegalArgumentException(name);
         };
-        return SMALLEST.contains(name) ? new Optimum(-found.value(), found.at()) : found;
+        double value = SMALLEST.contains(name) ? -found.value() : found.value();
+        return new Optimum(value, found.exists() ? trim.ofWhole(found.at()) : found.at());
     }
 
     /** A length read off the pose the solver stands at; in m. */
@@ -101,7 +107,7 @@ final class RangeDimensions {
     }
 
     private Optimum lowestDump() {
-        if (front.hoist() < 0) {
+        if (front.hoist() < 0 || !trim.reachesItsEnd(front.hoist())) {
             return new Optimum(Double.NaN, free);
         }
         double[] hoisted = free.clone();

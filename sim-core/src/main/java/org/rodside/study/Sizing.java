@@ -51,9 +51,9 @@ public final class Sizing {
     public static List<SizeRow> find(
             Front front, LoadsAnswer loads, SizeQuestion question, int threads, DoubleConsumer progress) {
         List<PushProfile> profiles = new ArrayList<>();
-        for (LoadCase load : loads.cases()) {
-            profiles.add(new PushProfile(front, load));
-        }
+        List<LoadCase> cases = loads.cases();
+        new Chunks(threads, done -> {})
+                .<PushProfile>inOrder(cases.size(), () -> i -> new PushProfile(front, cases.get(i)), profiles::add);
         Sizing sizing = new Sizing(front, question, loads, profiles);
         List<SizeRow> rows = new ArrayList<>();
         int cylinders = front.mechanism().cylinders();

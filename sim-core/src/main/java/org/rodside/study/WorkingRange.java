@@ -18,13 +18,14 @@ public final class WorkingRange {
     /** Finds dimensions and outline of a front, the same for any number of threads; an error where the linkage has no tool. */
     public static RangeAnswer of(Front front, int threads) {
         front.tool();
+        StrokeTrim trim = StrokeTrim.of(front);
         List<String> names = RangeDimensions.NAMES;
         List<double[][]> outline = new ArrayList<>();
         Map<String, Double> dimensions = new LinkedHashMap<>();
         Map<String, double[]> poses = new LinkedHashMap<>();
         // the outline first, for it takes longest
         new Chunks(threads, done -> {})
-                .<Optimum>inOrder(1 + names.size(), () -> worker(front, outline), new Consumer<>() {
+                .<Optimum>inOrder(1 + names.size(), () -> worker(trim, outline), new Consumer<>() {
                     private int next;
 
                     @Override
@@ -39,11 +40,11 @@ public final class WorkingRange {
         return new RangeAnswer(dimensions, poses, outline);
     }
 
-    private static IntFunction<Optimum> worker(Front front, List<double[][]> outline) {
-        RangeDimensions range = new RangeDimensions(front);
+    private static IntFunction<Optimum> worker(StrokeTrim trim, List<double[][]> outline) {
+        RangeDimensions range = new RangeDimensions(trim);
         return piece -> {
             if (piece == 0) {
-                outline.addAll(Outline.of(front));
+                outline.addAll(Outline.of(trim.front()));
                 return null;
             }
             return range.find(RangeDimensions.NAMES.get(piece - 1));

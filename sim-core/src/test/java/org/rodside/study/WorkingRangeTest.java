@@ -9,8 +9,10 @@ import java.util.List;
 import java.util.SplittableRandom;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import org.rodside.io.LinkageReader;
+import org.rodside.kinematics.PoseSolver;
 
 class WorkingRangeTest {
 
@@ -22,8 +24,8 @@ class WorkingRangeTest {
 
     private static final int POSES = 20_000;
 
-    private static Front front(String file) {
-        return Front.of(LinkageReader.read(Path.of("../linkages", file), List.of()));
+    private static Front front(String file, String... overrides) {
+        return Front.of(LinkageReader.read(Path.of("../linkages", file), List.of(overrides)));
     }
 
     @ParameterizedTest
@@ -55,6 +57,41 @@ class WorkingRangeTest {
                 range.dimensions().get("cutting_height"),
                 Arrays.stream(ring[1]).max().orElseThrow(),
                 DIMENSION);
+    }
+
+    /** A stroke too long for the linkage: the outline still closes and holds every pose that assembles. */
+    @ParameterizedTest
+    @CsvSource({
+        "cylinders.stick.stroke=2540, cylinders.stick.mass=1",
+        "cylinders.bucket.retracted=1250, cylinders.bucket.stroke=1200",
+        "cylinders.boom.retracted=1500, cylinders.boom.stroke=1499"
+    })
+    void strokesThatPartlyDoNotAssemble(String one, String two) {
+        Front front = front("sallow-22.json", one, two);
+        RangeAnswer range = WorkingRange.of(front, 2);
+        double[][] ring = range.outline().get(0);
+        assertTrue(range.dimensions().get("level_depth") > 6, "there is a level floor");
+        FrontSolver solver = new FrontSolver(front);
+        SplittableRandom random = new SplittableRandom(4);
+        double[] most = {Double.NEGATIVE_INFINITY, Double.NEGATIVE_INFINITY, Double.NEGATIVE_INFINITY};
+        int failed = 0;
+        for (int i = 0; i < POSES; i++) {
+            if (solver.place(random.doubles(3).toArray()) != PoseSolver.ASSEMBLED) {
+                failed++;
+                continue;
+            }
+            double x = front.tip().x(solver.pose());
+            double y = front.tip().y(solver.pose());
+            assertTrue(inside(ring, x, y) || gap(ring, x, y) < OUTLINE, x + " " + y);
+            most[0] = Math.max(most[0], x);
+            most[1] = Math.max(most[1], y);
+            most[2] = Math.max(most[2], -y);
+        }
+        assertTrue(failed > POSES / 10, failed + " poses do not assemble");
+        assertTrue(range.dimensions().get("reach") >= most[0]);
+        assertTrue(range.dimensions().get("cutting_height") >= most[1]);
+        assertTrue(range.dimensions().get("depth") >= most[2]);
+        range.at().forEach((name, at) -> assertEquals(PoseSolver.ASSEMBLED, solver.place(at), name));
     }
 
     /** Every point just inside the line is reachable and every point just outside is not, by an inverse search. */
