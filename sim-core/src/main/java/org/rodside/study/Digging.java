@@ -8,7 +8,7 @@ import org.rodside.model.InputException;
 /** Digging forces: at one pose, and rated as SAE J1179 (at the lip: ISO 6015) has them (theory S6, S7). */
 public final class Digging {
 
-    /** Limits that meet on a ridge do so within this share of the force, the last in order is named; no unit. */
+    /** Limits that meet on a ridge do so within this share of the force; no unit. */
     private static final double RIDGE = 1e-7;
 
     private final Front front;
@@ -69,6 +69,19 @@ public final class Digging {
             throw new InputException("cylinders: no pose of the stroke box gives a digging force; see 'check'");
         }
         double force = dig.force(best.at());
-        return new DigForce(force, dig.limits().name(dig.limits().lastMet(RIDGE)), best.at());
+        return new DigForce(force, dig.limits().name(nearestTheTool(dig.limits())), best.at());
+    }
+
+    /** Of the limits met at a rated pose that of the cylinder nearest the tool. */
+    private int nearestTheTool(LimitSolver limits) {
+        SweepGrid order = new SweepGrid(front.mechanism(), 2);
+        for (int axis = order.axes() - 1; axis >= 0; axis--) {
+            for (int line = 2 * order.cylinder(axis); line <= 2 * order.cylinder(axis) + 1; line++) {
+                if (limits.meets(line, RIDGE)) {
+                    return line;
+                }
+            }
+        }
+        return limits.governing();
     }
 }

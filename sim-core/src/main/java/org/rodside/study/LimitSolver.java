@@ -115,14 +115,9 @@ public final class LimitSolver {
         return governing;
     }
 
-    /** The last limit, in their order, that is met within a share of the last answer; {@link #NONE} where none is. */
-    int lastMet(double share) {
-        for (int line = meeting.length - 1; line >= 0; line--) {
-            if (meeting[line] <= largest * (1 + share)) {
-                return Math.min(line, names.size() - 1);
-            }
-        }
-        return NONE;
+    /** Whether one line meets its limit within a share of the last answer. */
+    boolean meets(int line, double share) {
+        return meeting[line] <= largest * (1 + share);
     }
 
     /** Number of lines against which the last answer was held; slip counts twice, once for each direction. */
