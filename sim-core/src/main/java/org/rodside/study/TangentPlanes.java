@@ -20,6 +20,9 @@ final class TangentPlanes {
 
     private static final int MOST_PIVOTS = 200;
 
+    /** A plane flatter than the steepest by this factor counts as level: the programme's own tolerance; no unit. */
+    private static final double LEVEL = 1e-6;
+
     private final int n;
     private final double[] centre;
     private final double[] low;
@@ -167,21 +170,18 @@ final class TangentPlanes {
     }
 
     /**
-     * As shares of the box; heights over the extent of the flattest plane and steeper rows over their own, so that the programme's
-     * tolerances fit; null where it fails.
+     * As shares of the box; heights over the spread of the plane that is lowest at the centre, and steeper rows over their own, so
+     * that the programme's tolerances fit; null where it fails.
      */
     private double[] programme(List<double[]> binding) {
-        double size = Double.POSITIVE_INFINITY;
-        for (double[] plane : binding) {
-            size = Math.min(size, spread(plane));
-        }
+        double size = scale(binding);
         if (!(size > 0)) {
             return null;
         }
         List<LinearConstraint> constraints = new ArrayList<>();
         for (double[] plane : binding) {
             double[] row = new double[n + 1];
-            double own = spread(plane);
+            double own = Math.max(size, spread(plane));
             for (int a = 0; a < n; a++) {
                 row[a] = -plane[a] * extent[a] / own;
             }
@@ -194,6 +194,16 @@ final class TangentPlanes {
             constraints.add(new LinearConstraint(row, Relationship.LEQ, 1));
         }
         return solve(constraints);
+    }
+
+    private double scale(List<double[]> binding) {
+        double[] lowest = binding.get(0);
+        double steepest = 0;
+        for (double[] plane : binding) {
+            lowest = plane[n] < lowest[n] ? plane : lowest;
+            steepest = Math.max(steepest, spread(plane));
+        }
+        return Math.max(spread(lowest), LEVEL * steepest);
     }
 
     /** Difference between a plane's highest and lowest corner over the box. */
