@@ -62,6 +62,7 @@ public final class EnvelopeReport {
         map.put("range", range.map());
         map.put("at", at);
         map.put("holes", Math.max(0, answer.outline().size() - 1));
+        map.put("notes", answer.notes());
         return map;
     }
 
@@ -71,6 +72,12 @@ public final class EnvelopeReport {
     }
 
     private String notes() {
+        StringBuilder notes = new StringBuilder();
+        answer.notes().forEach(note -> notes.append("Note: ").append(note).append('\n'));
+        return notes + closing();
+    }
+
+    private String closing() {
         if (answer.outline().isEmpty()) {
             return "The outline could not be closed: 'check' tells which poses do not assemble.\n";
         }
@@ -143,7 +150,7 @@ public final class EnvelopeReport {
     public void section(PageWriter page) {
         page.section(
                 "Working range",
-                "The line bounds all that the tip can reach; dimensions are exact, not read off a grid.");
+                "The line bounds all that the tip can reach; dimensions are exact, not read off a grid. " + notes());
         page.figure(plot(), "Outline of the tip, with the front as drawn.", PageWriter.DRAWING);
         page.table("", headings(), rows());
     }

@@ -3,6 +3,7 @@ package org.rodside.study;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import org.rodside.kinematics.Mechanism;
 import org.rodside.kinematics.PoseSolver;
@@ -126,6 +127,22 @@ final class StrokeTrim {
     /** Whether a cylinder still extends fully. */
     boolean reachesItsEnd(int cylinder) {
         return high[cylinder] == 1;
+    }
+
+    /** A sentence for every stroke that was trimmed. */
+    List<String> notes() {
+        List<String> notes = new ArrayList<>();
+        for (int c = 0; c < low.length; c++) {
+            if (low[c] != 0 || high[c] != 1) {
+                notes.add(String.format(
+                        Locale.ROOT,
+                        "%s: the linkage assembles from %.3f to %.3f of its stroke only; the range is over that part.",
+                        front.mechanism().cylinderName(c),
+                        low[c],
+                        high[c]));
+            }
+        }
+        return notes;
     }
 
     /** Fractions of the whole strokes. */

@@ -37,7 +37,7 @@ public final class WorkingRange {
                     }
                 });
         dimensions.put("level_depth", -Outline.deepestLevel(outline, LEVEL_FLOOR));
-        return new RangeAnswer(dimensions, poses, outline);
+        return new RangeAnswer(dimensions, poses, outline, trim.notes());
     }
 
     private static IntFunction<Optimum> worker(StrokeTrim trim, List<double[][]> outline) {

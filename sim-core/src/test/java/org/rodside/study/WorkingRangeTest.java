@@ -71,6 +71,7 @@ class WorkingRangeTest {
         RangeAnswer range = WorkingRange.of(front, 2);
         double[][] ring = range.outline().get(0);
         assertTrue(range.dimensions().get("level_depth") > 6, "there is a level floor");
+        assertEquals(1, range.notes().size(), "one stroke is trimmed, and told");
         FrontSolver solver = new FrontSolver(front);
         SplittableRandom random = new SplittableRandom(4);
         double[] most = {Double.NEGATIVE_INFINITY, Double.NEGATIVE_INFINITY, Double.NEGATIVE_INFINITY};
