@@ -85,7 +85,7 @@ public final class DigSolver {
             @Override
             public void tellPieces(double[] out) {
                 for (int line = 0; line < out.length; line++) {
-                    out[line] = limits.meeting(line);
+                    out[line] = Math.max(0, limits.meeting(line));
                 }
             }
         };

@@ -13,7 +13,7 @@ final class LimitLine {
     /** Stands for no load at all where a reciprocal is taken; far below any load over room in 1/N. */
     private static final double NO_LOAD = 1e-300;
 
-    /** The smallest product of the rooms of a pair: below zero where a limit is broken without any force. */
+    /** The smallest room, or product of rooms of tipping: below zero where a limit is broken without any force. */
     private final double[] least;
 
     /** Product of the rooms of all pairs met so far; with six pairs of 10⁹ N it stays far from overflow. */
@@ -57,8 +57,8 @@ final class LimitLine {
      *
      * @param fixed its force without tool force; in N
      * @param unit what a unit tool force adds; no unit
-     * @param push most push; in N
-     * @param pull most pull; in N, above zero
+     * @param push most push; in N, below zero where friction and back pressure leave none
+     * @param pull most pull; in N, likewise
      */
     void meet(double[] fixed, double[] unit, double push, double pull) {
         double half = 0.5 * (pull - push);
@@ -72,7 +72,9 @@ final class LimitLine {
         }
         for (int i = 0; i < load.length; i++) {
             rooms[i] *= product[i];
-            least[i] = Math.min(least[i], product[i]);
+        }
+        for (int i = 0; i < load.length; i++) {
+            least[i] = Math.min(least[i], Math.min(push - fixed[i], pull + fixed[i]));
         }
     }
 

@@ -24,14 +24,17 @@ class StageSweepTest {
 
     @ParameterizedTest
     @CsvSource({
-        "sallow-22.json, TIP, false",
-        "sallow-22.json, LIP, true",
-        "fenbrook-backhoe.json, TIP, false",
-        "fenbrook-backhoe.json, TIP, true",
-        "tarn-ridge-two-piece.json, TIP, false",
+        "sallow-22.json, TIP, false, note=plain",
+        "sallow-22.json, LIP, true, note=plain",
+        "fenbrook-backhoe.json, TIP, false, note=plain",
+        "fenbrook-backhoe.json, TIP, true, note=plain",
+        "tarn-ridge-two-piece.json, TIP, false, note=plain",
+        "sallow-22.json, TIP, false, cylinders.bucket.friction.constant=3000",
+        "sallow-22.json, TIP, false, machine.swinging.mass=20",
+        "sallow-22.json, TIP, false, machine.grip=0.05",
     })
-    void agreesWithTheGeneralSolvers(String file, Edge edge, boolean ideal) {
-        Front front = Front.of(LinkageReader.read(Path.of("../linkages", file), List.of()));
+    void agreesWithTheGeneralSolvers(String file, Edge edge, boolean ideal, String override) {
+        Front front = Front.of(LinkageReader.read(Path.of("../linkages", file), List.of(override)));
         SweepGrid grid = new SweepGrid(front.mechanism(), 13);
         Optional<StageSweep> sweep = StageSweep.of(front, grid, edge.of(front));
         assertTrue(sweep.isPresent(), "one chain of stages");
