@@ -92,7 +92,7 @@ public final class DigReport {
         return "Rated digging forces (working pressure, weights and friction left out, other circuits held)\n"
                 + TextTable.of(headings(), ratedRows(curl, crowd))
                 + "\nLargest tool forces met in a sweep of " + sweep.poses()
-                + " poses (weights, friction, tipping and slip counted)\n"
+                + " poses (weights, friction, tipping and slip " + (sweep.ideal() ? "left out" : "counted") + ")\n"
                 + TextTable.of(headings(), sweepRows(sweep));
     }
 

@@ -135,6 +135,15 @@ class CoreCommandsTest {
         }
     }
 
+    @Test
+    void theSummarySaysWhatASweepLeavesOut() {
+        String files = folder.resolve("dig").toString();
+        assertEquals(0, run("dig", FRONT, "--steps", "3", "--ideal", "--out", files));
+        assertTrue(out.contains("slip left out"), out);
+        assertEquals(0, run("dig", FRONT, "--steps", "3", "--out", files));
+        assertTrue(out.contains("slip counted"), out);
+    }
+
     @ParameterizedTest
     @ValueSource(strings = {"pose", "dig", "check"})
     void jsonIsOneObjectAndWritesNothing(String command) throws IOException {

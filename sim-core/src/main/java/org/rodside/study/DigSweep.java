@@ -113,7 +113,7 @@ public final class DigSweep {
         DigBest best = new DigBest();
         new Chunks(threads, progress).<DigBest>inOrder(pieces(linesAPiece), () -> bestWorker(linesAPiece), best::add);
         return new DigSummary(
-                poses(), best.assembled, at(best.curlPose, front.curl()), at(best.crowdPose, front.crowd()));
+                poses(), ideal, best.assembled, at(best.curlPose, front.curl()), at(best.crowdPose, front.crowd()));
     }
 
     private int pieces(int linesAPiece) {
