@@ -38,6 +38,16 @@ public class PoseBench {
 
     private static final int STEPS = 201;
 
+    /**
+     * Sums and products, comparisons and divisions a pose of three cylinders, counted in the loops of StageDigLine and LimitLine:
+     * 7 for the rooms on the ground, 29 a duty for the ground and the end, 4 a stage for weights, 18 a stage and duty for its limits; comparisons 5
+     * a duty and 3 a stage and duty; one division a duty.
+     */
+    private static final int SUMS = 7 + 2 * 29 + 3 * 4 + 6 * 18;
+
+    private static final int COMPARISONS = 2 * 5 + 6 * 3;
+    private static final int DIVISIONS = 2;
+
     private final Front front = Front.of(LinkageReader.read(Path.of("../linkages/sallow-22.json"), List.of()));
     private final Mechanism mechanism = front.mechanism();
     private final double[][] strokes = new double[64][];
@@ -57,6 +67,9 @@ public class PoseBench {
     private final int[] outer = new int[2];
     private final double[][] matrix;
     private final double[] side;
+    private final double[] one = new double[STEPS];
+    private final double[] two = new double[STEPS];
+    private final double[] sum = new double[STEPS];
     private int next;
 
     public PoseBench() {
@@ -76,6 +89,10 @@ public class PoseBench {
             System.arraycopy(random.doubles(size, -1, 1).toArray(), 0, row, 0, size);
         }
         side = random.doubles(size).toArray();
+        for (int i = 0; i < STEPS; i++) {
+            one[i] = random.nextDouble(1, 2);
+            two[i] = random.nextDouble(1, 2);
+        }
     }
 
     @Benchmark
@@ -129,5 +146,31 @@ public class PoseBench {
         grid.outer(next++ % grid.lines(), outer);
         line.run(outer, run);
         return run.curl;
+    }
+
+    /**
+     * The arithmetic of {@link #bothForcesInASweep} without its meaning: as many sums, products, comparisons and divisions a
+     * pose, over as short arrays in as short loops; one operation is one pose.
+     */
+    @Benchmark
+    @OperationsPerInvocation(STEPS)
+    public double[] sameOperationsAlone() {
+        for (int pass = 0; pass < SUMS / 4; pass++) {
+            double a = 1e-3 * pass;
+            for (int i = 0; i < STEPS; i++) {
+                sum[i] = sum[i] + a * one[i] + (1 - a) * two[i];
+            }
+        }
+        for (int pass = 0; pass < COMPARISONS; pass++) {
+            for (int i = 0; i < STEPS; i++) {
+                sum[i] = Math.max(sum[i], one[i]);
+            }
+        }
+        for (int pass = 0; pass < DIVISIONS; pass++) {
+            for (int i = 0; i < STEPS; i++) {
+                sum[i] = one[i] / sum[i];
+            }
+        }
+        return sum;
     }
 }
