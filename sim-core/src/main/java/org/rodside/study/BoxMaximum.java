@@ -42,7 +42,7 @@ public final class BoxMaximum {
     private static final int[] GRID = {257, 49, 21, 11, 7, 5};
 
     /** Hills that are climbed. */
-    private static final int CLIMBS = 16;
+    private static final int CLIMBS = 8;
 
     /** Grid points climbed besides, drawn at random: a plateau shows no hills. */
     private static final int RANDOM_STARTS = 8;
