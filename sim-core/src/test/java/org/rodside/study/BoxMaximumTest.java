@@ -12,7 +12,7 @@ import org.junit.jupiter.api.Test;
 /** The search for a largest value, on functions whose peak is known. */
 class BoxMaximumTest {
 
-    /** Peaks are known exactly; the climb ends when a restart gains less than 1e-7 of a value of about 100. */
+    /** Peaks are known exactly; a start is given up that promises no more than 1e-8 of a value of about 100. */
     private static final double PEAK_ABS = 1e-5;
 
     /** The least of several planes and bowls that all meet at a random place: the sharpest ridges there are. */
