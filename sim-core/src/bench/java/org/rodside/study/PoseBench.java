@@ -39,7 +39,7 @@ public class PoseBench {
     private static final int STEPS = 201;
 
     /**
-     * Sums and products, comparisons and divisions a pose of three cylinders, counted in the loops of StageDigLine and LimitLine:
+     * Sums and products, comparisons and divisions a pose of three cylinders, counted in the loops of StageDigLine and LimitLineBuffer:
      * 7 for the rooms on the ground, 29 a duty for the ground and the end, 4 a stage for weights, 18 a stage and duty for its limits; comparisons 5
      * a duty and 3 a stage and duty; one division a duty.
      */

@@ -49,7 +49,7 @@ final class RidgeClimber {
     private final BoxMaximum.Objective objective;
     private final int[] free;
     private final int n;
-    private final TangentPlanes planes;
+    private final TangentPlaneBuffer planes;
     private final double[] width;
     private final double[] trusted;
     private final double[] box;
@@ -71,7 +71,7 @@ final class RidgeClimber {
         this.objective = objective;
         this.free = free;
         n = free.length;
-        planes = new TangentPlanes(n);
+        planes = new TangentPlaneBuffer(n);
         width = new double[n];
         trusted = new double[n];
         box = new double[n];

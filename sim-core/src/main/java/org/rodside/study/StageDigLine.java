@@ -35,8 +35,8 @@ final class StageDigLine implements DigLine {
     private final double[] groundRoom;
     private final double[] up;
     private final double[] other;
-    private final LimitLine limits1;
-    private final LimitLine limits2;
+    private final LimitLineBuffer limits1;
+    private final LimitLineBuffer limits2;
 
     StageDigLine(StageSweep sweep, boolean ideal) {
         this.sweep = sweep;
@@ -64,8 +64,8 @@ final class StageDigLine implements DigLine {
         groundRoom = new double[steps];
         up = new double[steps];
         other = new double[steps];
-        limits1 = new LimitLine(steps);
-        limits2 = new LimitLine(steps);
+        limits1 = new LimitLineBuffer(steps);
+        limits2 = new LimitLineBuffer(steps);
     }
 
     private void capacities(Front made) {
@@ -178,7 +178,7 @@ final class StageDigLine implements DigLine {
     }
 
     /** Meets tipping and slip. */
-    private void ground(DutyLine duty, LimitLine limits) {
+    private void ground(DutyLine duty, LimitLineBuffer limits) {
         double c = line.cos();
         double s = line.sin();
         double offX = c * line.x() + s * line.y();

@@ -8,7 +8,7 @@ import java.util.Arrays;
  * left for the end. The loops are short, without branches and over flat arrays: the compiler turns such loops into vector
  * instructions, and leaves longer ones alone. Mutable and not thread-safe.
  */
-final class LimitLine {
+final class LimitLineBuffer {
 
     /** Stands for no load at all where a reciprocal is taken; far below any load over room in 1/N. */
     private static final double NO_LOAD = 1e-300;
@@ -24,7 +24,7 @@ final class LimitLine {
 
     private final double[] product;
 
-    LimitLine(int steps) {
+    LimitLineBuffer(int steps) {
         product = new double[steps];
         least = new double[steps];
         rooms = new double[steps];

@@ -16,7 +16,7 @@ import org.apache.commons.math3.optim.nonlinear.scalar.GoalType;
  * Tangent planes of a function's pieces, and the highest point under all of them within a small box about a centre, cut to
  * the stroke box: a linear programme (theory W1). Not thread-safe.
  */
-final class TangentPlanes {
+final class TangentPlaneBuffer {
 
     private static final int MOST_PIVOTS = 200;
 
@@ -34,7 +34,7 @@ final class TangentPlanes {
     /**
      * @param n number of axes
      */
-    TangentPlanes(int n) {
+    TangentPlaneBuffer(int n) {
         this.n = n;
         centre = new double[n];
         low = new double[n];
@@ -137,11 +137,11 @@ final class TangentPlanes {
             for (int a = 0; a < n; a++) {
                 bottom += Math.min(0, plane[a] * extent[a]);
             }
-            if (bottom < lowestTop) {
+            if (bottom <= lowestTop) {
                 binding.add(plane);
             }
         }
-        return binding.isEmpty() && !planes.isEmpty() ? List.of(planes.get(0)) : binding;
+        return binding;
     }
 
     private double heightAtLow(double[] plane) {
