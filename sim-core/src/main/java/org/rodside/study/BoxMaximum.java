@@ -231,11 +231,16 @@ public final class BoxMaximum {
             if (before > values[cell] || after > values[cell]) {
                 return -1;
             }
-            drop = before < values[cell] ? Math.max(drop, values[cell] - before) : drop;
-            drop = after < values[cell] ? Math.max(drop, values[cell] - after) : drop;
+            drop = Math.max(drop, fall(values[cell], before, place == 0));
+            drop = Math.max(drop, fall(values[cell], after, place == grid - 1));
             stride *= grid;
         }
         return drop;
+    }
+
+    /** How far a neighbour lies lower; without end where it has no value, for much may rise towards it. */
+    private static double fall(double value, double neighbour, boolean outside) {
+        return outside ? 0 : Double.isNaN(neighbour) ? Double.POSITIVE_INFINITY : value - neighbour;
     }
 
     private Optimum climbFromCorners(double[] values, RidgeClimber ridge, Optimum from) {

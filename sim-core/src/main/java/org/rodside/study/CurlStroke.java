@@ -21,7 +21,7 @@ final class CurlStroke {
     private static final double BESIDE = 1e-3;
 
     /** Ends of a range of best strokes are found to this; share of a stroke. */
-    private static final double END = 1e-6;
+    private static final double END = 1e-9;
 
     /** The search has the stroke to this; share of a stroke. */
     private static final double NEAR = 1e-4;
@@ -82,19 +82,21 @@ final class CurlStroke {
 
     /** How far towards an end of the stroke the largest force stays the same. */
     private double end(double stroke, double towards, double force) {
-        double reached = stroke;
+        double reached = stroke + Math.max(-BESIDE, Math.min(BESIDE, towards - stroke));
+        if (!(largest(reached) >= force * (1 - SAME))) {
+            return stroke;
+        }
         double failed = towards;
-        double trial = stroke + Math.max(-BESIDE, Math.min(BESIDE, towards - stroke));
+        if (largest(towards) >= force * (1 - SAME)) {
+            return towards;
+        }
         while (Math.abs(failed - reached) > END) {
-            if (largest(trial) >= force * (1 - SAME)) {
-                reached = trial;
+            double middle = (reached + failed) / 2;
+            if (largest(middle) >= force * (1 - SAME)) {
+                reached = middle;
             } else {
-                failed = trial;
+                failed = middle;
             }
-            if (Math.abs(reached - stroke) < BESIDE / 2) {
-                return stroke;
-            }
-            trial = reached == towards ? towards : (reached + failed) / 2;
         }
         return reached;
     }

@@ -68,7 +68,10 @@ public final class DigSolver {
         return limits.largest(fixed, unit, fixedGround, unitGround);
     }
 
-    /** The force as a function of the pose that tells its pieces, one for each line that may meet a limit. */
+    /**
+     * The force as a function of the pose that tells its pieces, one for each line that may meet a limit; for a solver without weights,
+     * where no limit is broken that load relieves.
+     */
     BoxMaximum.Objective asObjective() {
         return new BoxMaximum.Objective() {
             @Override

@@ -103,7 +103,9 @@ final class FaceCurve {
         double share = roots.solve(
                 EVALUATIONS,
                 t -> {
-                    double here = sine(from[0] + t * (to[0] - from[0]), from[1] + t * (to[1] - from[1]));
+                    double here = t == 1
+                            ? sine(to[0], to[1])
+                            : sine(from[0] + t * (to[0] - from[0]), from[1] + t * (to[1] - from[1]));
                     // a pose between that does not assemble ends the search on either side of it
                     return Double.isNaN(here) ? 0 : here;
                 },

@@ -13,7 +13,11 @@ final class LimitLineBuffer {
     /** Stands for no load at all where a reciprocal is taken; far below any load over room in 1/N. */
     private static final double NO_LOAD = 1e-300;
 
-    /** The smallest room, or product of rooms of tipping: below zero where a limit is broken without any force. */
+    /**
+     * The smallest room of a cylinder, or product of the rooms of tipping (the front line lies before the rear one, so both are
+     * never below zero): not above zero where a limit is broken without any force. A cylinder without any push or pull
+     * is not for this class.
+     */
     private final double[] least;
 
     /** Product of the rooms of all pairs met so far; with six pairs of 10⁹ N it stays far from overflow. */

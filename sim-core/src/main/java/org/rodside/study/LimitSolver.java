@@ -115,7 +115,7 @@ public final class LimitSolver {
         return governing;
     }
 
-    /** Whether one line meets its limit within a share of the last answer. */
+    /** Whether one line meets its limit within a share of the last answer, which is not infinite. */
     boolean meets(int line, double share) {
         return meeting[line] <= largest * (1 + share);
     }
@@ -129,8 +129,8 @@ public final class LimitSolver {
      * Load factor at which one line meets its limit, smooth in the pose as long as it stays finite.
      *
      * @param line 0 to {@link #lines()} - 1
-     * @return the factor, below zero where the limit is broken without any load and load breaks it further; infinite where it is
-     *     never met
+     * @return the factor, below zero where the limit is broken without any load and load breaks it further; infinite where load
+     *     only takes away from it, broken or not
      */
     double meeting(int line) {
         return meeting[line];

@@ -34,7 +34,7 @@ final class PushProfile {
         this.load = load;
         int cylinders = front.mechanism().cylinders();
         search = BoxMaximum.overAll(cylinders);
-        slices = (int) Math.round(Math.pow(search.cells(), 1.0 / cylinders));
+        slices = search.cells() / search.cellsInASlice();
         push = new double[cylinders][slices];
         cell = new int[cylinders][slices];
         Arrays.stream(cell).forEach(row -> Arrays.fill(row, -1));

@@ -1,6 +1,7 @@
 package org.rodside.study;
 
 import java.util.Arrays;
+import java.util.stream.Stream;
 import org.rodside.hydraulics.CylinderLimits;
 import org.rodside.model.Linkage;
 import org.rodside.model.Machine;
@@ -35,6 +36,9 @@ final class StageDigLine implements DigLine {
     private final double[] groundRoom;
     private final double[] up;
     private final double[] other;
+    /** Some cylinder may not push or not pull at all: without weights its room is zero, which a product of rooms cannot tell apart. */
+    private final boolean oneSided;
+
     private final LimitLineBuffer limits1;
     private final LimitLineBuffer limits2;
 
@@ -57,6 +61,9 @@ final class StageDigLine implements DigLine {
         drivingPush = new double[n];
         drivingPull = new double[n];
         capacities(made);
+        oneSided = Stream.of(push, pull, drivingPush, drivingPull)
+                .flatMapToDouble(Arrays::stream)
+                .anyMatch(most -> most == 0);
         fixed = new double[steps];
         unit = new double[steps];
         over = new double[steps];
@@ -88,6 +95,10 @@ final class StageDigLine implements DigLine {
 
     @Override
     public void forces(int[] outer, DigRun out) {
+        if (oneSided) {
+            run(outer, out);
+            return;
+        }
         begin(outer);
         DutyLine second = crowd == null ? curl : crowd;
         if (stability) {

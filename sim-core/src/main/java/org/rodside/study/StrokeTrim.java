@@ -22,8 +22,8 @@ final class StrokeTrim {
     /** Places on each stroke at which assembling is tried. */
     private static final int PLACES = 256;
 
-    /** The border is halved down to this and the trimmed stroke ends as far inside: ten times rounding, and a link still turns by its root there; share of a stroke. */
-    private static final double INSIDE = 4e-15;
+    /** The border is halved down to this and the trimmed stroke ends as far inside: ten times rounding; share of the length. */
+    private static final double INSIDE = 2e-15;
 
     private final Front front;
     private final double[] low;
@@ -87,10 +87,13 @@ final class StrokeTrim {
         return stands;
     }
 
+    /** A link turns by the root of what is missing to the border: hence so close. */
     private static double border(FrontSolver solver, double[] at, int c, double inside, double outside) {
+        Mechanism mechanism = solver.front().mechanism();
+        double close = INSIDE * (mechanism.retracted(c) + mechanism.stroke(c)) / mechanism.stroke(c);
         double in = inside;
         double out = outside;
-        while (Math.abs(out - in) > INSIDE) {
+        while (Math.abs(out - in) > close) {
             double middle = (in + out) / 2;
             if (stands(solver, at, c, middle)) {
                 in = middle;
@@ -98,7 +101,7 @@ final class StrokeTrim {
                 out = middle;
             }
         }
-        return in - Math.signum(outside - inside) * INSIDE;
+        return in - Math.signum(outside - inside) * close;
     }
 
     private static Linkage trimmed(Linkage whole, double[] low, double[] high) {

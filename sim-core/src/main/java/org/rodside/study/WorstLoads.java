@@ -26,6 +26,9 @@ public final class WorstLoads {
     /** A load beyond the relief by less than this share is at it; no unit. */
     private static final double ROUNDING = 1e-6;
 
+    /** A bearing force beyond what the cylinders hold by more than this factor comes from a dead centre; no unit. */
+    private static final double FAR = 10;
+
     private final Front front;
     private final Mechanism mechanism;
     private final int threads;
@@ -120,6 +123,13 @@ public final class WorstLoads {
                 notes.add(beyond);
             }
         }
+        for (LoadsAnswer.OnBearing load : onBearings) {
+            if (load.total() > FAR * holding()) {
+                notes.add(mechanism.pinName(mechanism.bearingPin(load.bearing())) + " on "
+                        + mechanism.bodyName(mechanism.bearingBody(load.bearing())) + ", " + load.loadCase()
+                        + ": the force is far more than the cylinders hold. Near a dead centre it has no upper end.");
+            }
+        }
         for (LoadsAnswer.Intensified side : intensified()) {
             if (side.relief() < side.rod()) {
                 notes.add(mechanism.cylinderName(side.cylinder())
@@ -127,6 +137,16 @@ public final class WorstLoads {
             }
         }
         return notes;
+    }
+
+    /** What all cylinders together hold by their reliefs; in N. */
+    private double holding() {
+        double sum = 0;
+        for (int c = 0; c < mechanism.cylinders(); c++) {
+            CylinderLimits limits = front.limits(c, false);
+            sum += Math.max(limits.holdingPush(), limits.holdingPull());
+        }
+        return sum;
     }
 
     /** What to say where a load asks for more than the cylinder's relief holds; empty where it does not. */

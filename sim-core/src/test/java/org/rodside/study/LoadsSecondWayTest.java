@@ -156,7 +156,7 @@ class LoadsSecondWayTest {
 
     /** All quantities on a plane of the stroke box through a worst pose, twenty times finer than the search's own grid. */
     @Test
-    void aSweepTenTimesFinerThroughAWorstPoseFindsNothingWorse() {
+    void aSweepTwentyTimesFinerThroughAWorstPoseFindsNothingWorse() {
         Front front = front("sallow-22.json");
         LoadsAnswer answer = WorstLoads.find(front, WorstLoads.usualCases(front, 1800), 2, done -> {});
         LoadCase load = LoadCase.curl();

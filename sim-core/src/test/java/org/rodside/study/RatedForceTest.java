@@ -34,7 +34,9 @@ class RatedForceTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"sallow-22.json", "fenbrook-backhoe.json", "tarn-ridge-two-piece.json"})
+    @ValueSource(
+            strings = {"sallow-22.json", "fenbrook-backhoe.json", "tarn-ridge-two-piece.json", "cullen-bank-shovel.json"
+            })
     void sameForceAndLimitInAnyOrder(String file) throws IOException {
         Path path = Path.of("../linkages", file);
         Digging drawn = new Digging(Front.of(LinkageReader.read(path, List.of())), Edge.TIP);

@@ -32,6 +32,8 @@ class StageSweepTest {
         "sallow-22.json, TIP, false, cylinders.bucket.friction.constant=3000",
         "sallow-22.json, TIP, false, machine.swinging.mass=20",
         "sallow-22.json, TIP, false, machine.grip=0.05",
+        "sallow-22.json, TIP, true, cylinders.boom.relief.rod=0",
+        "sallow-22.json, TIP, true, cylinders.bucket.working=0",
     })
     void agreesWithTheGeneralSolvers(String file, Edge edge, boolean ideal, String override) {
         Front front = Front.of(LinkageReader.read(Path.of("../linkages", file), List.of(override)));
