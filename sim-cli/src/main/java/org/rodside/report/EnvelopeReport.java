@@ -79,7 +79,8 @@ public final class EnvelopeReport {
 
     private String closing() {
         if (answer.outline().isEmpty()) {
-            return "The outline could not be closed: 'check' tells which poses do not assemble.\n";
+            return "The outline could not be closed, so that the level depth is missing; the other dimensions stand."
+                    + " 'check' tells whether poses do not assemble or stand near a dead centre.\n";
         }
         int holes = answer.outline().size() - 1;
         return holes == 0 ? "" : "The reach of the tip has " + holes + (holes == 1 ? " hole" : " holes") + " in it.\n";

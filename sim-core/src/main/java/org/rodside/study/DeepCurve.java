@@ -14,8 +14,11 @@ final class DeepCurve {
     /** Values of the first stroke. */
     private static final int STATIONS = 24;
 
-    /** Cells an axis for two and for three or more strokes to solve for. */
-    private static final int[] CELLS = {14, 7};
+    /**
+     * Cells an axis for two and for three or more strokes to solve for; smaller towards the ends, for near a dead centre the place
+     * moves by the root of the stroke.
+     */
+    private static final int[] CELLS = {20, 8};
 
     private static final int ROUNDS = 25;
     private static final double DIFFERENCE = 1e-6;
@@ -110,10 +113,10 @@ final class DeepCurve {
             at[free[0]] = first;
             int rest = cell;
             for (int k = 1; k < free.length; k++) {
-                at[free[k]] = (rest % cells + 0.5) / cells;
+                at[free[k]] = 0.5 - 0.5 * Math.cos(Math.PI * (rest % cells + 0.5) / cells);
                 rest /= cells;
             }
-            if (mayHold(at, 1.0 / cells) && newton(at) && nearestIsFar(at, found)) {
+            if (mayHold(at, Math.PI / 2 / cells) && newton(at) && nearestIsFar(at, found)) {
                 found.add(at);
             }
         }
@@ -132,7 +135,7 @@ final class DeepCurve {
         return gap > SAME;
     }
 
-    /** Whether every sine is small enough at the middle of a cell to vanish in it or its neighbours. */
+    /** Whether every sine is small enough at the middle of a cell to vanish in it or its neighbours; size: of the cell, no smaller. */
     private boolean mayHold(double[] at, double size) {
         sines(at, side);
         double[] here = side.clone();
