@@ -61,9 +61,7 @@ final class StageDigLine implements DigLine {
         drivingPush = new double[n];
         drivingPull = new double[n];
         capacities(made);
-        oneSided = Stream.of(push, pull, drivingPush, drivingPull)
-                .flatMapToDouble(Arrays::stream)
-                .anyMatch(most -> most == 0);
+        oneSided = oneSided();
         fixed = new double[steps];
         unit = new double[steps];
         over = new double[steps];
@@ -73,6 +71,12 @@ final class StageDigLine implements DigLine {
         other = new double[steps];
         limits1 = new LimitLineBuffer(steps);
         limits2 = new LimitLineBuffer(steps);
+    }
+
+    private boolean oneSided() {
+        return Stream.of(push, pull, drivingPush, drivingPull)
+                .flatMapToDouble(Arrays::stream)
+                .anyMatch(most -> most == 0);
     }
 
     private void capacities(Front made) {
