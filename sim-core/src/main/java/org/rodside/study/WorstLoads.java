@@ -123,13 +123,7 @@ public final class WorstLoads {
                 notes.add(beyond);
             }
         }
-        for (LoadsAnswer.OnBearing load : onBearings) {
-            if (load.total() > FAR * holding()) {
-                notes.add(mechanism.pinName(mechanism.bearingPin(load.bearing())) + " on "
-                        + mechanism.bodyName(mechanism.bearingBody(load.bearing())) + ", " + load.loadCase()
-                        + ": the force is far more than the cylinders hold. Near a dead centre it has no upper end.");
-            }
-        }
+        addBearingNotes(notes);
         for (LoadsAnswer.Intensified side : intensified()) {
             if (side.relief() < side.rod()) {
                 notes.add(mechanism.cylinderName(side.cylinder())
@@ -137,6 +131,16 @@ public final class WorstLoads {
             }
         }
         return notes;
+    }
+
+    private void addBearingNotes(List<String> notes) {
+        for (LoadsAnswer.OnBearing load : onBearings) {
+            if (load.total() > FAR * holding()) {
+                notes.add(mechanism.pinName(mechanism.bearingPin(load.bearing())) + " on "
+                        + mechanism.bodyName(mechanism.bearingBody(load.bearing())) + ", " + load.loadCase()
+                        + ": the force is far more than the cylinders hold. Near a dead centre it has no upper end.");
+            }
+        }
     }
 
     /** What all cylinders together hold by their reliefs; in N. */
