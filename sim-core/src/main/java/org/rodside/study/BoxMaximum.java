@@ -5,6 +5,7 @@ import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.SplittableRandom;
+import java.util.stream.IntStream;
 
 /**
  * Largest value of a function of the stroke fractions over the whole stroke box (theory W1): a grid finds the hills; the highest of
@@ -63,44 +64,40 @@ public final class BoxMaximum {
      * @param fixed fraction of each cylinder that does not move, NaN for one that is free; not modified
      */
     public BoxMaximum(double[] fixed) {
-        this(fixed, 1);
+        this(fixed, GRID[Math.max(1, Math.min(freeAxes(fixed).length, GRID.length)) - 1]);
     }
 
-    /**
-     * @param fixed fraction of each cylinder that does not move, NaN for one that is free; not modified
-     * @param refinement how many times finer than usual the first grid is
-     */
-    public BoxMaximum(double[] fixed, int refinement) {
-        this((usualGrid(fixed) - 1) * refinement + 1, fixed);
-    }
-
-    private BoxMaximum(int gridPoints, double[] fixed) {
-        List<Integer> moving = new ArrayList<>();
-        for (int c = 0; c < fixed.length; c++) {
-            if (Double.isNaN(fixed[c])) {
-                moving.add(c);
-            }
-        }
-        free = moving.stream().mapToInt(Integer::intValue).toArray();
+    private BoxMaximum(double[] fixed, int gridPoints) {
+        free = freeAxes(fixed);
         start = fixed.clone();
         grid = free.length == 0 ? 1 : gridPoints;
     }
 
-    private static int usualGrid(double[] fixed) {
-        int free = (int) Arrays.stream(fixed).filter(Double::isNaN).count();
-        return free == 0 ? 1 : GRID[Math.min(free, GRID.length) - 1];
+    private static int[] freeAxes(double[] fixed) {
+        return IntStream.range(0, fixed.length)
+                .filter(c -> Double.isNaN(fixed[c]))
+                .toArray();
     }
 
     /** A search whose first grid has a given number of points an axis. */
     static BoxMaximum withGrid(double[] fixed, int gridPoints) {
-        return new BoxMaximum(gridPoints, fixed);
+        return new BoxMaximum(fixed, gridPoints);
     }
 
     /** A search over all strokes of a front. */
     public static BoxMaximum overAll(int cylinders) {
+        return new BoxMaximum(allFree(cylinders));
+    }
+
+    /** As {@link #overAll(int)} with a first grid that many times finer than usual. */
+    static BoxMaximum overAll(int cylinders, int refinement) {
+        return withGrid(allFree(cylinders), (overAll(cylinders).grid - 1) * refinement + 1);
+    }
+
+    private static double[] allFree(int cylinders) {
         double[] all = new double[cylinders];
         Arrays.fill(all, Double.NaN);
-        return new BoxMaximum(all);
+        return all;
     }
 
     /** Finds the largest value. */

@@ -19,22 +19,29 @@ final class DigBest {
         double mostCurl = most(run.curl);
         double mostCrowd = most(run.crowd);
         assembled += Double.isNaN(mostCurl) ? assembled(run.curl) : run.curl.length;
-        if (!(mostCurl <= curl)) {
-            for (int i = 0; i < run.curl.length; i++) {
-                if (run.curl[i] > curl && run.curl[i] < UNLIMITED) {
-                    curl = run.curl[i];
-                    curlPose = first + i;
-                }
+        int newCurl = mostCurl <= curl ? -1 : firstAbove(run.curl, curl);
+        if (newCurl >= 0) {
+            curl = run.curl[newCurl];
+            curlPose = first + newCurl;
+        }
+        int newCrowd = mostCrowd <= crowd ? -1 : firstAbove(run.crowd, crowd);
+        if (newCrowd >= 0) {
+            crowd = run.crowd[newCrowd];
+            crowdPose = first + newCrowd;
+        }
+    }
+
+    /** Place of the largest force above a best one, the first of equals; -1 where none is. */
+    private static int firstAbove(double[] forces, double best) {
+        int place = -1;
+        double most = best;
+        for (int i = 0; i < forces.length; i++) {
+            if (forces[i] > most && forces[i] < UNLIMITED) {
+                most = forces[i];
+                place = i;
             }
         }
-        if (!(mostCrowd <= crowd)) {
-            for (int i = 0; i < run.crowd.length; i++) {
-                if (run.crowd[i] > crowd && run.crowd[i] < UNLIMITED) {
-                    crowd = run.crowd[i];
-                    crowdPose = first + i;
-                }
-            }
-        }
+        return place;
     }
 
     /** The largest of all, NaN where one is: few lines hold a new best, and this loop has no branches. */

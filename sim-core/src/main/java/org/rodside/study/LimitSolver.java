@@ -27,6 +27,10 @@ public final class LimitSolver {
     private final double rear;
     private final double grip;
     private final double[] meeting;
+
+    /** Index of the limit of slip, on which two lines end, one for each direction. */
+    private final int slip;
+
     private double largest;
     private int governing;
 
@@ -48,6 +52,7 @@ public final class LimitSolver {
             names.add(name + ".rod");
         }
         names.addAll(List.of("tipping.front", "tipping.rear", "slip"));
+        slip = names.size() - 1;
         Machine machine = front.machine().orElse(null);
         stability = machine != null && !ideal;
         this.front = stability ? machine.tippingFront() : Double.NaN;
@@ -87,13 +92,13 @@ public final class LimitSolver {
         largestOnCylinders(fixed, unit);
         if (stability) {
             int next = 2 * push.length;
-            meet(next, next, -fixedGround.momentAbout(front), -unitGround.momentAbout(front), 0);
-            meet(next + 1, next + 1, fixedGround.momentAbout(rear), unitGround.momentAbout(rear), 0);
+            meet(next, -fixedGround.momentAbout(front), -unitGround.momentAbout(front), 0);
+            meet(next + 1, fixedGround.momentAbout(rear), unitGround.momentAbout(rear), 0);
             if (!Double.isNaN(grip)) {
                 double fixedGrip = grip * fixedGround.normal();
                 double unitGrip = grip * unitGround.normal();
-                meet(next + 2, next + 2, fixedGround.horizontal() - fixedGrip, unitGround.horizontal() - unitGrip, 0);
-                meet(next + 3, next + 2, -fixedGround.horizontal() - fixedGrip, -unitGround.horizontal() - unitGrip, 0);
+                meet(next + 2, fixedGround.horizontal() - fixedGrip, unitGround.horizontal() - unitGrip, 0);
+                meet(next + 3, -fixedGround.horizontal() - fixedGrip, -unitGround.horizontal() - unitGrip, 0);
             }
         }
         return largest;
@@ -104,8 +109,8 @@ public final class LimitSolver {
         largest = Double.POSITIVE_INFINITY;
         governing = NONE;
         for (int c = 0; c < push.length; c++) {
-            meet(2 * c, 2 * c, fixed.cylinder(c), unit.cylinder(c), push[c]);
-            meet(2 * c + 1, 2 * c + 1, -fixed.cylinder(c), -unit.cylinder(c), pull[c]);
+            meet(2 * c, fixed.cylinder(c), unit.cylinder(c), push[c]);
+            meet(2 * c + 1, -fixed.cylinder(c), -unit.cylinder(c), pull[c]);
         }
         return largest;
     }
@@ -136,7 +141,7 @@ public final class LimitSolver {
         return meeting[line];
     }
 
-    private void meet(int line, int limit, double fixed, double unit, double most) {
+    private void meet(int line, double fixed, double unit, double most) {
         if (Double.isNaN(fixed) || Double.isNaN(unit)) {
             largest = Double.NaN;
             return;
@@ -146,7 +151,7 @@ public final class LimitSolver {
         double t = room < 0 ? 0 : meeting[line];
         if (t < largest) {
             largest = t;
-            governing = limit;
+            governing = Math.min(line, slip);
         }
     }
 }

@@ -125,8 +125,9 @@ final class RangeDimensions {
     }
 
     private Optimum swing() {
-        Optimum best = new BoxMaximum(free).find(new SwingRoom());
-        return best.exists() && read(best.at(), this::leastY) >= -ABOVE ? best : new Optimum(Double.NaN, free);
+        SwingRoom room = new SwingRoom();
+        Optimum best = new BoxMaximum(free).find(room);
+        return best.exists() && read(best.at(), room::leastY) >= -ABOVE ? best : new Optimum(Double.NaN, free);
     }
 
     /** The swing radius, less is better, with what lies below ground charged; its pieces pair an outermost with a lowest place. */
@@ -161,6 +162,14 @@ final class RangeDimensions {
             }
         }
 
+        double leastY() {
+            double least = Double.POSITIVE_INFINITY;
+            for (int i = 0; i < places; i++) {
+                least = Math.min(least, y(i));
+            }
+            return least;
+        }
+
         private double x(int i) {
             return i < pins ? pose.pinX(i) : pose.x(tip.body(), points[i - pins].x(), points[i - pins].y());
         }
@@ -168,17 +177,6 @@ final class RangeDimensions {
         private double y(int i) {
             return i < pins ? pose.pinY(i) : pose.y(tip.body(), points[i - pins].x(), points[i - pins].y());
         }
-    }
-
-    private double leastY() {
-        double least = Double.POSITIVE_INFINITY;
-        for (int pin = 0; pin < front.mechanism().pins(); pin++) {
-            least = Math.min(least, pose.pinY(pin));
-        }
-        for (Point point : toolPoints().values()) {
-            least = Math.min(least, pose.y(tip.body(), point.x(), point.y()));
-        }
-        return least;
     }
 
     private Map<String, Point> toolPoints() {

@@ -101,6 +101,7 @@ final class RidgeClimber {
         value = from.value();
         trial = here.clone();
         Arrays.fill(width, FIRST);
+        objective.at(here);
         boolean rises = true;
         for (int i = 0; i < steps && rises; i++) {
             takeSlopes();
@@ -109,10 +110,9 @@ final class RidgeClimber {
         return new Optimum(value, here);
     }
 
-    /** Goes to a higher place; false where none is found however small the box. */
+    /** Goes to a higher place, the one asked for last; false where none is found however small the box. */
     private boolean step() {
         while (Arrays.stream(width).max().orElseThrow() > LAST) {
-            layPlanes(here, pieces);
             if (!planes.highest(box(), place)) {
                 scale(LEAST_LEFT);
                 continue;
@@ -145,7 +145,6 @@ final class RidgeClimber {
     }
 
     private boolean hopeless(double toBeat) {
-        layPlanes(here, pieces);
         return value + planes.most() <= toBeat + BARELY * Math.abs(toBeat);
     }
 
@@ -180,6 +179,7 @@ final class RidgeClimber {
         tellPieces(reached, bent);
         layPlanes(trial, bent);
         double again = planes.highest(box(), place) ? tryPlace() : gain;
+        layPlanes(here, pieces);
         return Double.isNaN(again) ? gain : again;
     }
 
@@ -209,9 +209,9 @@ final class RidgeClimber {
         return out;
     }
 
-    /** All pieces at the present place, their slopes, and how far they are to be trusted. */
+    /** All pieces at the present place, which was asked for last, their slopes, how far these are to be trusted, and their planes. */
     private void takeSlopes() {
-        tellPieces(objective.at(here), pieces);
+        tellPieces(value, pieces);
         System.arraycopy(here, 0, trial, 0, here.length);
         Arrays.fill(trusted, WIDEST);
         for (int a = 0; a < n; a++) {
@@ -226,6 +226,7 @@ final class RidgeClimber {
                 takeBend(a, step);
             }
         }
+        layPlanes(here, pieces);
     }
 
     private double beside(int a, double by) {

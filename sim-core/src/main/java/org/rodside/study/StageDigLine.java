@@ -185,11 +185,20 @@ final class StageDigLine implements DigLine {
     private void groundRooms() {
         double down = Linkage.GRAVITY;
         combine(0, -down * line.cos(), down * line.sin(), sweep.last().momentX, sweep.last().momentY, places);
-        double atFront = line.momentWithoutLast + front * line.totalWeight;
-        double atRear = -line.momentWithoutLast - rear * line.totalWeight;
+        double atFront = atFront();
+        double atRear = atRear();
         for (int i = 0; i < places.length; i++) {
             groundRoom[i] = (atFront + places[i]) * (atRear - places[i]);
         }
+    }
+
+    /** Room of tipping over the front line without the last stage's places; in N·m. */
+    private double atFront() {
+        return line.momentWithoutLast + front * line.totalWeight;
+    }
+
+    private double atRear() {
+        return -line.momentWithoutLast - rear * line.totalWeight;
     }
 
     /** Meets tipping and slip. */
@@ -220,8 +229,8 @@ final class StageDigLine implements DigLine {
     }
 
     private void tipping() {
-        double atFront = line.momentWithoutLast + front * line.totalWeight;
-        double atRear = -line.momentWithoutLast - rear * line.totalWeight;
+        double atFront = atFront();
+        double atRear = atRear();
         for (int i = 0; i < over.length; i++) {
             double toFront = other[i] - front * up[i];
             double toRear = rear * up[i] - other[i];

@@ -68,7 +68,7 @@ final class TangentPlaneBuffer {
             height += slope[a] * (centre[a] - at[a]);
         }
         plane[n] = height;
-        boolean finite = Math.abs(height) < Double.POSITIVE_INFINITY;
+        boolean finite = true;
         for (double part : plane) {
             finite &= Math.abs(part) < Double.POSITIVE_INFINITY;
         }

@@ -34,6 +34,7 @@ public final class WorstLoads {
     private final int threads;
     private final BoxMaximum search;
     private final int[] twin;
+    private final int[] asked;
     private final List<Column> columns;
     private final List<CylinderPressure> pressures;
     private final List<LoadsAnswer.OnCylinder> onCylinders = new ArrayList<>();
@@ -44,10 +45,9 @@ public final class WorstLoads {
         this.front = front;
         this.threads = threads;
         mechanism = front.mechanism();
-        double[] all = new double[mechanism.cylinders()];
-        Arrays.fill(all, Double.NaN);
-        search = new BoxMaximum(all, refinement);
+        search = BoxMaximum.overAll(mechanism.cylinders(), refinement);
         twin = twins();
+        asked = IntStream.range(0, twin.length).filter(q -> twin[q] == q).toArray();
         columns = front.linkage().cylinders().stream().map(Column::of).toList();
         pressures = front.linkage().cylinders().stream()
                 .map(c -> CylinderPressure.of(c, false))
@@ -219,12 +219,10 @@ public final class WorstLoads {
 
     private void add(LoadCase load) {
         double[][] values = grid(load);
-        int[] asked = IntStream.range(0, quantities()).filter(q -> twin[q] == q).toArray();
         Optimum[] tops = new Optimum[quantities()];
         int[] next = {0};
         new Chunks(threads, done -> {})
-                .<Optimum>inOrder(
-                        asked.length, () -> climber(load, values, asked), top -> tops[asked[next[0]++]] = top);
+                .<Optimum>inOrder(asked.length, () -> climber(load, values), top -> tops[asked[next[0]++]] = top);
         CaseSolver solver = new CaseSolver(front, load);
         for (int q = 0; q < tops.length; q++) {
             addRow(load, solver, q, tops[twin[q]]);
@@ -241,9 +239,9 @@ public final class WorstLoads {
         }
     }
 
-    /** Every quantity at every grid pose. */
+    /** Every quantity that is asked for at every grid pose. */
     private double[][] grid(LoadCase load) {
-        double[][] values = new double[quantities()][search.cells()];
+        double[][] values = new double[asked.length][search.cells()];
         int slices = search.cells() / search.cellsInASlice();
         new Chunks(threads, done -> {})
                 .<Long>inOrder(slices, () -> gridWorker(load, values), count -> skipped += count);
@@ -253,7 +251,7 @@ public final class WorstLoads {
     private IntFunction<Long> gridWorker(LoadCase load, double[][] values) {
         CaseSolver solver = new CaseSolver(front, load);
         LoadQuantity[] quantity = new LoadQuantity[values.length];
-        Arrays.setAll(quantity, q -> quantity(solver, q));
+        Arrays.setAll(quantity, i -> quantity(solver, asked[i]));
         return slice -> {
             long left = 0;
             int first = slice * search.cellsInASlice();
@@ -268,9 +266,9 @@ public final class WorstLoads {
         };
     }
 
-    private IntFunction<Optimum> climber(LoadCase load, double[][] values, int[] asked) {
+    private IntFunction<Optimum> climber(LoadCase load, double[][] values) {
         CaseSolver solver = new CaseSolver(front, load);
-        return i -> search.findFrom(values[asked[i]], quantity(solver, asked[i]));
+        return i -> search.findFrom(values[i], quantity(solver, asked[i]));
     }
 
     private LoadsAnswer.OnCylinder row(LoadCase load, CaseSolver solver, int c, LoadsAnswer.Sense sense, Optimum top) {
