@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.function.Consumer;
 import java.util.function.IntFunction;
 
 /** Working range of the tip and the hook: named dimensions and the true outline (docs/working-range.md). */
@@ -21,25 +20,23 @@ public final class WorkingRange {
         StrokeTrim trim = StrokeTrim.of(front);
         List<String> names = RangeDimensions.NAMES;
         List<double[][]> outline = new ArrayList<>();
+        List<Optimum> found = new ArrayList<>();
+        // the outline first, for it takes longest
+        new Chunks(threads, done -> {}).<Optimum>inOrder(1 + names.size(), () -> worker(trim, outline), found::add);
         Map<String, Double> dimensions = new LinkedHashMap<>();
         Map<String, double[]> poses = new LinkedHashMap<>();
-        // the outline first, for it takes longest
-        new Chunks(threads, done -> {})
-                .<Optimum>inOrder(1 + names.size(), () -> worker(trim, outline), new Consumer<>() {
-                    private int next;
-
-                    @Override
-                    public void accept(Optimum found) {
-                        if (next > 0) {
-                            put(names.get(next - 1), found, dimensions, poses);
-                        }
-                        next++;
-                    }
-                });
+        for (int i = 0; i < names.size(); i++) {
+            Optimum dimension = found.get(1 + i);
+            dimensions.put(names.get(i), dimension.value());
+            if (dimension.exists()) {
+                poses.put(names.get(i), dimension.at());
+            }
+        }
         dimensions.put("level_depth", -Outline.deepestLevel(outline, LEVEL_FLOOR));
         return new RangeAnswer(dimensions, poses, outline, trim.notes());
     }
 
+    /** The first piece fills the outline and has no answer of its own, each later one finds a dimension. */
     private static IntFunction<Optimum> worker(StrokeTrim trim, List<double[][]> outline) {
         RangeDimensions range = new RangeDimensions(trim);
         return piece -> {
@@ -49,12 +46,5 @@ public final class WorkingRange {
             }
             return range.find(RangeDimensions.NAMES.get(piece - 1));
         };
-    }
-
-    private static void put(String name, Optimum found, Map<String, Double> dimensions, Map<String, double[]> poses) {
-        dimensions.put(name, found.value());
-        if (found.exists()) {
-            poses.put(name, found.at());
-        }
     }
 }

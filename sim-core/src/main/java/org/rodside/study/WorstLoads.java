@@ -219,13 +219,11 @@ public final class WorstLoads {
 
     private void add(LoadCase load) {
         double[][] values = grid(load);
-        Optimum[] tops = new Optimum[quantities()];
-        int[] next = {0};
-        new Chunks(threads, done -> {})
-                .<Optimum>inOrder(asked.length, () -> climber(load, values), top -> tops[asked[next[0]++]] = top);
+        List<Optimum> tops = new ArrayList<>();
+        new Chunks(threads, done -> {}).<Optimum>inOrder(asked.length, () -> climber(load, values), tops::add);
         CaseSolver solver = new CaseSolver(front, load);
-        for (int q = 0; q < tops.length; q++) {
-            addRow(load, solver, q, tops[twin[q]]);
+        for (int q = 0; q < twin.length; q++) {
+            addRow(load, solver, q, tops.get(Arrays.binarySearch(asked, twin[q])));
         }
     }
 
